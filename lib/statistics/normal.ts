@@ -31,7 +31,7 @@ function oddSeries(x: number): number {
 /** x + 1/(x + 2/(x + 3/(x + …))), taken deep enough for 1e-16 at the smallest x used. */
 function continuedFraction(x: number): number {
   let value = x;
-  for (let k = Math.ceil(20 + 160 / (x * x)); k > 0; k -= 1) value = x + k / value;
+  for (let k = Math.ceil(15 + 360 / (x * x)); k > 0; k -= 1) value = x + k / value;
   return value;
 }
 
