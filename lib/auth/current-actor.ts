@@ -10,7 +10,7 @@ import type { Actor } from "./actor";
 import { loadActor } from "./load-actor";
 import { authOptions } from "./options";
 import { can, type Permission, rolesWith } from "./permissions";
-import { readView, VIEW_COOKIE } from "./view-cookie";
+import { readView, VIEW_COOKIE } from "./view";
 
 async function findActor(db: Knex): Promise<Actor | null> {
   const session = await getServerSession(authOptions());

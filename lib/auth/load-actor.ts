@@ -2,11 +2,10 @@ import "server-only";
 import type { Knex } from "knex";
 import type { Actor } from "./actor";
 import { findPersonWithMemberships } from "./queries";
-import { ROLES, type Role } from "./roles";
+import { ROLES } from "./roles";
+import type { View } from "./view";
 
 export type Session = { personId: string; sessionVersion: number };
-/** The department and role a person chose last. Only a wish: it counts where the database grants it. */
-export type View = { departmentId: string; role: Role };
 
 /** The actor of a session, or null when the session no longer holds. */
 export async function loadActor(db: Knex, session: Session, view: View | null): Promise<Actor | null> {

@@ -32,6 +32,14 @@ function casesWithLatestReference(db: Knex, departmentId: string) {
   return db("cases")
     .joinRaw(LATEST_REFERENCE)
     .where("cases.department_id", departmentId)
+    .select(
+      db("items")
+        .join("rounds", "rounds.id", "items.round_id")
+        .whereRaw("items.case_id = cases.id")
+        .whereNot("rounds.state", "draft")
+        .max("rounds.number")
+        .as("last_round_number"),
+    )
     .select<CaseRow[]>(
       "cases.id",
       "cases.code",
@@ -39,12 +47,6 @@ function casesWithLatestReference(db: Knex, departmentId: string) {
       "cases.is_anchor",
       "cases.retired_at",
       ...findingColumnsOf("latest"),
-      db("items")
-        .join("rounds", "rounds.id", "items.round_id")
-        .whereRaw("items.case_id = cases.id")
-        .whereNot("rounds.state", "draft")
-        .max("rounds.number")
-        .as("last_round_number"),
     );
 }
 

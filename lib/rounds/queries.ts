@@ -71,8 +71,7 @@ function summaries(db: Knex, departmentId: string) {
   const assignments = () => db("assignments").whereRaw("assignments.round_id = rounds.id");
   return db("rounds")
     .where("rounds.department_id", departmentId)
-    .select<SummaryRow[]>(
-      "rounds.*",
+    .select(
       db("items").whereRaw("items.round_id = rounds.id").count("*").as("item_count"),
       assignments().count("*").as("examiner_count"),
       assignments().whereNotNull("submitted_at").count("*").as("submitted_count"),
@@ -81,7 +80,8 @@ function summaries(db: Knex, departmentId: string) {
         .join("readings", "readings.assignment_item_id", "assignment_items.id")
         .count("*")
         .as("reading_count"),
-    );
+    )
+    .select<SummaryRow[]>("rounds.*");
 }
 
 function toSummary(row: SummaryRow): RoundSummary {

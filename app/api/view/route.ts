@@ -1,6 +1,6 @@
 import { cookies } from "next/headers";
 import { LANDING } from "@/lib/auth/roles";
-import { VIEW_COOKIE, ViewSchema, writeView } from "@/lib/auth/view-cookie";
+import { VIEW_COOKIE, ViewSchema, writeView } from "@/lib/auth/view";
 import { notFound } from "@/lib/errors";
 import { handle } from "@/lib/http/handle";
 import { parseJson } from "@/lib/http/parse";

@@ -1,10 +1,11 @@
 import { z } from "zod";
-import type { View } from "./load-actor";
 import { ROLES } from "./roles";
 
 export const VIEW_COOKIE = "evenglint-view";
 
+/** The department and role a person chose last. Only a wish: it counts where the database grants it. */
 export const ViewSchema = z.strictObject({ departmentId: z.uuid(), role: z.enum(ROLES) });
+export type View = z.infer<typeof ViewSchema>;
 
 export function writeView({ departmentId, role }: View): string {
   return `${departmentId}.${role}`;
