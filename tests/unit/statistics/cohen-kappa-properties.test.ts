@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { cohenKappa } from "@/lib/statistics/cohen-kappa";
 import { freeze } from "./arbitrary-ratings";
-import { near } from "./near";
+import { near, nearEstimate } from "./near";
 
 const weighting = fc.constantFrom("none", "linear", "quadratic");
 
@@ -112,10 +112,6 @@ describe("cohenKappa always", () => {
 function expectOk(result: ReturnType<typeof cohenKappa>) {
   if (!result.ok) throw new Error(result.reason);
   return result;
-}
-
-function nearEstimate({ estimate, standardError = Number.NaN }: { estimate: number; standardError?: number }) {
-  return { estimate: near(estimate), standardError: near(standardError) };
 }
 
 type Weights = "none" | "linear" | "quadratic";

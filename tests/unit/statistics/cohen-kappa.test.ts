@@ -20,7 +20,7 @@ import paradox from "../../reference/kappa-paradox-feinstein-cicchetti-1990.json
 // Stuart 1953; confirmed with R vcd.
 import vision from "../../reference/kappa-vision-stuart-1953.json";
 import { counts } from "./grid";
-import { near } from "./near";
+import { near, nearEstimate } from "./near";
 
 type ExpectedKappa = (typeof everitt)["expected"]["unweighted"];
 
@@ -234,10 +234,6 @@ describe("cohenKappa refuses the caller's mistakes", () => {
 function expectOk(result: ReturnType<typeof cohenKappa>) {
   if (!result.ok) throw new Error(result.reason);
   return result;
-}
-
-function nearEstimate({ estimate, standardError = Number.NaN }: { estimate: number; standardError?: number }) {
-  return { estimate: near(estimate), standardError: near(standardError) };
 }
 
 function countsOf({ proportions, n }: { proportions: number[][]; n: number }): number[][] {

@@ -1,0 +1,79 @@
+import { type CountTable, columnSums, dot, sum } from "./count-tables";
+import { studentInterval } from "./intervals";
+import { type Estimate, type Result, refuse } from "./result";
+
+export type ChanceCorrected = { coefficient: Estimate; observed: number; expected: number };
+
+/**
+ * Agreement expected by chance of two sets of category shares. Linear in each, so that it serves the panel with itself
+ * and one subject with the panel.
+ */
+export type ChanceAgreement = (first: readonly number[], second: readonly number[]) => number;
+
+/**
+ * The frame that Fleiss' kappa and Gwet's AC share: observed agreement over the subjects rated twice or more, chance
+ * agreement from the shares of all subjects, and a standard error by linearisation over subjects.
+ *
+ * Shape: subjects × categories counts, rows of any total; `weights` between categories, 1 on the diagonal.
+ * Subjects without a rating do not count. Refuses without a subject rated twice, and where chance agreement is complete.
+ * Source: Gwet, Handbook of Inter-Rater Reliability, 4th ed. 2014; variance also Gwet, British Journal of Mathematical
+ * and Statistical Psychology 2008; 61: 29-48. Interval by t with n − 1 degrees of freedom.
+ */
+export function chanceCorrected(
+  counts: CountTable,
+  weights: CountTable,
+  chanceAgreement: ChanceAgreement,
+  confidence: number,
+): Result<ChanceCorrected> {
+  const subjects = counts.filter((row) => sum(row) > 0);
+  const n = subjects.length;
+  if (n === 0) return refuse(0, "no ratings");
+  const agreements = subjects.map((row) => subjectAgreement(row, weights));
+  const paired = agreements.filter((agreement) => agreement !== null);
+  if (paired.length === 0) return refuse(n, "no subject was rated twice");
+
+  const ownShares = subjects.map(toShares);
+  const panelShares = columnSums(ownShares).map((total) => total / n);
+  const observed = sum(paired) / paired.length;
+  const expected = chanceAgreement(panelShares, panelShares);
+  if (expected === 1) return refuse(n, "one category only");
+  const estimate = (observed - expected) / (1 - expected);
+  if (n === 1) return { ok: true, n, coefficient: { estimate }, observed, expected };
+
+  // What each subject adds to the coefficient: these average to the estimate, and their spread is its variance.
+  const contributions = agreements.map((agreement, subject) => {
+    const ownChance = chanceAgreement(ownShares[subject] ?? [], panelShares);
+    const gain = agreement === null ? 0 : ((n / paired.length) * (agreement - expected)) / (1 - expected);
+    return gain - (2 * (1 - estimate) * (ownChance - expected)) / (1 - expected);
+  });
+  const standardError = Math.sqrt(squaresAround(estimate, contributions) / (n * (n - 1)));
+  return {
+    ok: true,
+    n,
+    coefficient: studentInterval(estimate, standardError, n - 1, confidence),
+    observed,
+    expected,
+  };
+}
+
+/** Share of the pairs of a subject's ratings that agree, near misses by their weight; null below two ratings. */
+export function subjectAgreement(counts: readonly number[], weights: CountTable): number | null {
+  const total = sum(counts);
+  if (total < 2) return null;
+  let agreeing = 0;
+  counts.forEach((count, category) => {
+    if (count > 0) agreeing += count * (dot(weights[category] ?? [], counts) - 1);
+  });
+  return agreeing / (total * (total - 1));
+}
+
+function toShares(counts: readonly number[]): number[] {
+  const total = sum(counts);
+  return counts.map((count) => count / total);
+}
+
+function squaresAround(center: number, values: readonly number[]): number {
+  const squares = sum(values.map((value) => (value - center) ** 2));
+  // Below this the spread is rounding: subjects who all say the same of agreement have exactly none.
+  return squares < 1e-12 * sum(values.map((value) => value ** 2)) ? 0 : squares;
+}
