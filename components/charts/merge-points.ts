@@ -26,7 +26,7 @@ export function spotRadiusPx(count: number, countMax: number): number {
   return one * Math.sqrt(count);
 }
 
-export type HistogramBin = { centre: number; count: number };
+type HistogramBin = { centre: number; count: number };
 
 /** Differences counted in bins of equal width, one of them centred on zero; empty bins are left out. */
 export function binDifferences(differences: readonly number[], widthOfBin: number): HistogramBin[] {

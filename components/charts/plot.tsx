@@ -21,17 +21,30 @@ type PlotProps = {
   xDomain: [number, number];
   yDomain: [number, number];
   isYReversed?: boolean;
+  /** Points of a line through the plot; marks that carry their own points need none. A missing y is a gap. */
+  data?: { x: number | undefined; y: number | undefined }[];
   /** What the figure shows, in a sentence: the text alternative of the drawing. */
   label: string;
   children: ReactNode;
 };
 
 /** Two numeric axes without a drawing of their own; layers and marks are its children. */
-export function Plot({ width, height, margin, xDomain, yDomain, isYReversed = false, label, children }: PlotProps) {
+export function Plot({
+  width,
+  height,
+  margin,
+  xDomain,
+  yDomain,
+  isYReversed = false,
+  data,
+  label,
+  children,
+}: PlotProps) {
   return (
     <ComposedChart
       width={width}
       height={height}
+      data={data}
       margin={margin}
       accessibilityLayer={false}
       role="img"
