@@ -1,11 +1,13 @@
 import { BEYOND_LIMBUS, type Degrees, type Eye, type Finding } from "./finding";
+import { LANDMARK_DEGREES, mmAtLandmarks } from "./landmarks";
 
 /**
  * Radii of the rings of the reading map, in mm from the pupil centre, and the degrees the landmark rule gives them:
  * pupil margin 15, midway between margin and limbus 30, limbus 45. Common practice, no source: a pupil of 3.5 mm and
- * an iris of 11.7 mm across; the landmark rule itself is taught, not measured.
+ * an iris of 11.7 mm across; the landmark rule itself is taught, not measured. Beyond the limbus, `drawnMax` is the
+ * farthest a dot may lie without touching the edge of the drawn sclera.
  */
-export const READING_MAP_MM = { pupil: 1.75, midway: 3.8, limbus: 5.85, sclera: 9.2 } as const;
+export const READING_MAP_MM = { pupil: 1.75, midway: 3.8, limbus: 5.85, drawnMax: 8.4, sclera: 9.2 } as const;
 
 /** Where an eye that fixes shows its reflex: slightly nasal, by angle kappa. Common practice, no source. */
 const NORMAL_NASAL_MM = 0.5;
@@ -13,32 +15,16 @@ const NORMAL_NASAL_MM = 0.5;
 /** `>45` is censored. It is drawn on the sclera, in the middle of the strip outside the limbus, and never counted from. */
 const BEYOND_LIMBUS_DRAWN_DEGREES = 60;
 
-/** The farthest a dot may lie without touching the edge of the drawn sclera. */
-const DRAWN_MM_MAX = 8.4;
-
-/** Corners of the landmark rule, degrees against mm; straight lines between them. */
-const LANDMARKS: readonly (readonly [degrees: number, mm: number])[] = [
-  [0, 0],
-  [15, READING_MAP_MM.pupil],
-  [30, READING_MAP_MM.midway],
-  [45, READING_MAP_MM.limbus],
-  [BEYOND_LIMBUS_DRAWN_DEGREES, READING_MAP_MM.limbus + 2.4],
-];
+const SCLERA_MM_PER_DEGREE = 2.4 / 15;
 
 /** mm from the pupil centre as the viewer sees it: x to the viewer's right, y downwards. */
 export type MapPoint = { x: number; y: number };
 
-/** How far from the pupil centre the landmark rule puts the reflex of an eye deviating by `degrees`, in mm. */
+/** How far from the pupil centre the map draws a reflex at so many degrees: by the landmark rule, then onto the sclera. */
 export function landmarkDistanceMm(degrees: number): number {
-  let [fromDegrees, fromMm] = [0, 0];
-  for (const [toDegrees, toMm] of LANDMARKS) {
-    if (degrees <= toDegrees) {
-      if (toDegrees === fromDegrees) return toMm;
-      return fromMm + ((degrees - fromDegrees) / (toDegrees - fromDegrees)) * (toMm - fromMm);
-    }
-    [fromDegrees, fromMm] = [toDegrees, toMm];
-  }
-  return Math.min(DRAWN_MM_MAX, fromMm + (degrees - fromDegrees) * 0.16);
+  const { pupil: pupilMarginMm, limbus: limbusMm, drawnMax } = READING_MAP_MM;
+  const onIrisMm = mmAtLandmarks(degrees, { pupilMarginMm, limbusMm });
+  return onIrisMm ?? Math.min(drawnMax, limbusMm + (degrees - LANDMARK_DEGREES.limbus) * SCLERA_MM_PER_DEGREE);
 }
 
 /**
