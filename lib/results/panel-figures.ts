@@ -122,5 +122,6 @@ function amongExaminers(cases: readonly PanelCase[]): PanelFigures["amongExamine
 }
 
 function withInterval(estimate: number, interval: Result<Estimate>): Estimate {
-  return interval.ok ? { estimate, low: interval.low, high: interval.high } : { estimate };
+  if (!interval.ok) return { estimate };
+  return { estimate, standardError: interval.standardError, low: interval.low, high: interval.high };
 }

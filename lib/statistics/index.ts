@@ -1,0 +1,27 @@
+/** The program's public arithmetic: these names and no others. Each has a file of its own beside this one. */
+export { bootstrapInterval } from "./bootstrap";
+export { caseDisagreement } from "./case-disagreement";
+export { casesForLimits } from "./cases-for-limits";
+export { cohenKappa } from "./cohen-kappa";
+export { compareKappas } from "./compare-kappas";
+export { concordance } from "./concordance";
+export { congerKappa } from "./conger-kappa";
+export { crossTable } from "./cross-table";
+export { cusum } from "./cusum";
+export { ewma } from "./ewma";
+export { fleissKappa } from "./fleiss-kappa";
+export { gwetAC } from "./gwet-ac";
+export { intraclassCorrelation } from "./intraclass-correlation";
+export { krippendorffAlpha } from "./krippendorff-alpha";
+export { lightKappa } from "./light-kappa";
+export { limitsOfAgreement } from "./limits-of-agreement";
+export { limitsWithMean } from "./limits-with-mean";
+export { limitsWithReplicates } from "./limits-with-replicates";
+export { pairwiseKappa } from "./pairwise-kappa";
+export { casesForKappa, planKappa } from "./plan-kappa";
+export { planLimits } from "./plan-limits";
+export { repeatability } from "./repeatability";
+export { type Estimate, InputError, type Result } from "./result";
+export { shewhart } from "./shewhart";
+export { theilSen } from "./theil-sen";
+export { wilsonInterval } from "./wilson-interval";
