@@ -25,6 +25,7 @@ export default defineConfig({
           name: "integration",
           include: ["tests/integration/**/*.test.{ts,tsx}"],
           globalSetup: services,
+          setupFiles: ["tests/support/session.ts"],
           testTimeout: 30_000,
           hookTimeout: 60_000,
           sequence: { groupOrder: 2 },

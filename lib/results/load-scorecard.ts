@@ -34,11 +34,12 @@ export async function loadScorecard(
     listEarlierKappas(db, person, round.number),
   ]);
   const { id, number, title, convention, kappaFloor, releasedAt } = round;
+  const isSealedItem = (itemId: string) => items.some((item) => item.itemId === itemId && sealed.has(item.caseId));
   return {
     round: { id, number, title, convention },
     releasedAt: releasedAt.toISOString(),
     kappaFloor,
-    figures,
+    figures: { ...figures, items: figures.items.filter(({ itemId }) => !isSealedItem(itemId)) },
     earlier,
     cases: showings.flatMap((showing) => {
       const item = items.find(({ itemId }) => itemId === showing.itemId);
