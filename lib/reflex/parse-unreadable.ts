@@ -24,7 +24,7 @@ export function parseUnreadable(text: string): ParsedUnreadable | null {
   const reason = UNREADABLE_REASONS.find((candidate) => wordsFor(candidate).includes(said.replaceAll("-", " ")));
   if (reason) return { ok: true, finding: { readable: false, reason } };
   const choices = UNREADABLE_REASONS.map((candidate) => UNREADABLE_REASON_WORDS[candidate]).join(", ");
-  const isIncomplete = said === "" || UNREADABLE_REASONS.some((candidate) => isBegun(candidate, said));
+  const isIncomplete = UNREADABLE_REASONS.some((candidate) => isBegun(candidate, said));
   return { ok: false, isIncomplete, reason: `Say why it cannot be read: ${choices}.` };
 }
 

@@ -91,5 +91,5 @@ function isSizeWithin(read: number, reference: number, tolerance: Tolerance): bo
   if (!Number.isFinite(read) || !Number.isFinite(reference)) return read === reference;
   const size = Math.abs(reference);
   const allowed = size <= tolerance.absoluteUpToDegrees ? tolerance.absoluteDegrees : tolerance.relative * size;
-  return Math.abs(read - reference) <= allowed + 1e-9; // a share such as 0.15 is not exact in binary
+  return Math.abs(read - reference) <= allowed;
 }

@@ -86,6 +86,21 @@ describe("errorKind", () => {
   });
 });
 
+describe("errorKind by the department's own tolerance", () => {
+  it("holds sizes to it", () => {
+    const strict = { ...DEFAULT_TOLERANCE, absoluteDegrees: 1, relative: 0.05 };
+    expect(errorKind(deviation("left", { exo: 32 }), leftExo, strict)).toBe("size outside tolerance");
+    expect(errorKind(deviation("left", { exo: 8 }), deviation("left", { exo: 4 }), strict)).toBe("unit slip");
+    expect(errorKind(deviation("left", { exo: 32 }), leftExo)).toBeNull();
+  });
+
+  it("takes its borderline", () => {
+    const wider = { ...DEFAULT_TOLERANCE, borderlineHorizontalDegrees: 9, borderlineVerticalDegrees: 7 };
+    expect(errorKind(ALIGNED, deviation("left", { exo: 8, hypo: 6 }), wider)).toBeNull();
+    expect(errorKind(ALIGNED, deviation("left", { exo: 9 }), wider)).toBe("squint missed");
+  });
+});
+
 describe("the same vertical deviation named on the other eye", () => {
   const rightHyper = deviation("right", { hyper: 15 });
   const leftHypo = deviation("left", { hypo: 15 });

@@ -14,6 +14,7 @@ describe("isWithinTolerance", () => {
     [10, 15, true],
     [10, 4, false],
     [10, 16, false],
+    [19, 24, true], // 25% of 19 would be less than 5
     [20, 25, true],
     [20, 26, false],
     [21, 26, true], // 25% of 21 is 5.25
@@ -70,6 +71,8 @@ describe("isWithinTolerance", () => {
 
   it("still holds a borderline reference against a reading that sees a deviation", () => {
     expect(isWithinTolerance(deviation("right", { eso: 12 }), deviation("right", { eso: 4 }))).toBe(false);
+    expect(isWithinTolerance(deviation("right", { eso: 9 }), deviation("right", { eso: 4 }))).toBe(true);
+    expect(isWithinTolerance(deviation("right", { hyper: 7 }), deviation("right", { hyper: 2 }))).toBe(true);
   });
 
   it("goes by the department's own figures", () => {
