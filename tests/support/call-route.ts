@@ -11,7 +11,7 @@ type CallOptions = {
   headers?: Record<string, string>;
 };
 
-export type Called = { status: number; body: any; headers: Headers };
+export type Called = { status: number; body: unknown; headers: Headers };
 
 /** Calls a route handler as Next would, and reads the answer. */
 export async function callRoute(handler: Handler, options: CallOptions = {}): Promise<Called> {
@@ -21,7 +21,11 @@ export async function callRoute(handler: Handler, options: CallOptions = {}): Pr
   const isRaw = body instanceof FormData || typeof body === "string";
   const request = new NextRequest(url, {
     method: options.method ?? (body === undefined ? "GET" : "PUT"),
-    headers: { host: "localhost:3000", ...(!isRaw && body !== undefined && { "content-type": "application/json" }), ...headers },
+    headers: {
+      host: "localhost:3000",
+      ...(!isRaw && body !== undefined && { "content-type": "application/json" }),
+      ...headers,
+    },
     ...(body !== undefined && { body: isRaw ? body : JSON.stringify(body) }),
   });
   const response = await handler(request, { params: Promise.resolve(params) });

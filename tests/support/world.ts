@@ -40,7 +40,9 @@ export async function makePerson(
 export function makePhotograph(width = 420, height = 184): Promise<Buffer> {
   const shade = 90 + (next() % 120);
   const background = { r: shade, g: 120, b: 140 };
-  return sharp({ create: { width, height, channels: 3, background } }).jpeg().toBuffer();
+  return sharp({ create: { width, height, channels: 3, background } })
+    .jpeg()
+    .toBuffer();
 }
 
 export const leftExo = (degrees: number): ReadableFinding => deviation("left", "exo", degrees);
