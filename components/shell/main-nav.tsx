@@ -24,11 +24,11 @@ export function MainNav({ items }: { items: readonly NavItem[] }) {
   }, [current]);
 
   return (
-    <nav aria-label="Main" className="min-w-0 max-lg:order-3 max-lg:-mx-2 max-lg:basis-full print:hidden">
+    <nav aria-label="Main" className="flex min-w-0 max-lg:order-3 max-lg:-mx-2 max-lg:basis-full print:hidden">
       {/* The room below lets the glint stand on the rule although a row that scrolls cuts off what overhangs. */}
       <ul
         ref={row}
-        className="relative -mb-2 flex h-full min-h-12 overflow-x-auto overscroll-x-contain pb-2 [scrollbar-width:none]"
+        className="relative -mb-2 flex min-h-14 overflow-x-auto overscroll-x-contain pb-2 [scrollbar-width:none]"
       >
         {items.map(({ label, href }) => (
           <li key={href} className="flex">

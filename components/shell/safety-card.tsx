@@ -37,11 +37,11 @@ const SIGNS = [
     when: "promptly, by the local pathway",
     source: "BJGP 2017",
   },
-  { sign: "A new squint that is not paralytic", to: "ophthalmology", when: "refer", source: "NICE NG127" },
+  { sign: "A new squint that is not paralytic", to: "ophthalmology", when: "by referral", source: "NICE NG127" },
   {
     sign: "A squint still there beyond about three months of age",
     to: "ophthalmology",
-    when: "refer",
+    when: "by referral",
     source: UNSOURCED,
   },
 ];

@@ -7,7 +7,9 @@ export type ButtonSize = "slim" | "touch" | "desk";
 
 const BASE =
   "relative inline-flex items-center justify-center gap-2.5 rounded-control border text-center leading-[1.1] " +
-  "no-underline transition-colors duration-quick sm:whitespace-nowrap print:hidden";
+  "no-underline transition-[background-color,border-color,color] duration-quick sm:whitespace-nowrap print:hidden " +
+  "disabled:border-dashed disabled:border-edge disabled:bg-transparent disabled:text-ink-3 disabled:after:hidden " +
+  "aria-busy:cursor-progress aria-busy:after:hidden";
 
 const KINDS: Record<ButtonKind, string> = {
   main:
@@ -24,12 +26,8 @@ const SIZES: Record<ButtonSize, string> = {
   desk: "min-h-desk px-6 text-h3 tracking-normal",
 };
 
-const OFF = ["disabled", "aria-disabled"]
-  .map((state) => `${state}:border-dashed ${state}:border-edge ${state}:bg-transparent ${state}:text-ink-3`)
-  .join(" ");
-
 /** What a button and a link that looks like one share. */
 export function buttonClasses(kind: ButtonKind, size: ButtonSize, className?: string): string {
   const room = kind === "main" ? "pr-7" : kind === "bare" && "px-2.5";
-  return joinClasses(BASE, SIZES[size], KINDS[kind], room, OFF, className);
+  return joinClasses(BASE, SIZES[size], KINDS[kind], room, className);
 }

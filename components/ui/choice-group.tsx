@@ -1,4 +1,4 @@
-import type { ReactNode } from "react";
+import { type ReactNode, useId } from "react";
 import { FieldError } from "./field";
 import { joinClasses } from "./join-classes";
 import { Pick, type PickLayout } from "./pick";
@@ -44,8 +44,13 @@ const LEGENDS = {
 /** One question with few answers. Real radio buttons: Tab enters the group, arrows move in it, forms send it. */
 export function ChoiceGroup<Value extends string>(props: ChoiceGroupProps<Value>) {
   const { legend, legendLook = "label", name, choices, layout = "tiles", columns = 3, isDisabled, error } = props;
+  const errorId = useId();
   return (
-    <fieldset disabled={isDisabled} className={joinClasses("min-w-0", props.className)}>
+    <fieldset
+      disabled={isDisabled}
+      aria-describedby={error ? errorId : undefined}
+      className={joinClasses("min-w-0", props.className)}
+    >
       <legend className={LEGENDS[legendLook]}>{legend}</legend>
       <div className={joinClasses("grid auto-rows-fr gap-2", COLUMNS[layout][columns])}>
         {choices.map((choice) => (
@@ -61,7 +66,7 @@ export function ChoiceGroup<Value extends string>(props: ChoiceGroupProps<Value>
           />
         ))}
       </div>
-      {error && <FieldError>{error}</FieldError>}
+      {error && <FieldError id={errorId}>{error}</FieldError>}
     </fieldset>
   );
 }

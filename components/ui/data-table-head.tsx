@@ -26,9 +26,9 @@ export function DataTableHead({ columns, sort, onSort, isSticky }: DataTableHead
               scope="col"
               aria-sort={column.isSortable ? direction : undefined}
               className={joinClasses(
-                "py-2 pr-3 align-bottom text-small font-semibold text-ink-2 sm:shadow-[inset_0_-1px_0_var(--edge)]",
+                "py-2 align-bottom text-small font-semibold text-ink-2 sm:shadow-[inset_0_-1px_0_var(--edge)]",
                 isSticky && "bg-surface sm:sticky sm:top-0 sm:z-1",
-                column.isNumeric ? "text-right" : "text-left",
+                column.isNumeric ? "pr-5 text-right" : "pr-3 text-left",
                 column.isSortable ? "max-sm:p-0" : "max-sm:sr-only",
                 column.className,
               )}

@@ -4,7 +4,7 @@ import { joinClasses } from "./join-classes";
 
 const CHIP =
   "group/chip inline-flex min-h-touch items-center gap-2 rounded-control border border-edge bg-sheet px-3 text-small " +
-  "font-medium text-ink no-underline transition-colors duration-quick hover:border-ink sm:min-h-slim " +
+  "font-medium text-ink no-underline transition-[background-color,border-color,color] duration-quick hover:border-ink sm:min-h-slim " +
   "aria-pressed:lit aria-[current=true]:lit";
 
 type ChipFace = { label: string; count?: number; isOn: boolean };

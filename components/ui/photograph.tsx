@@ -24,7 +24,6 @@ export function Photograph({ alt, tools, fieldClassName, className, ...image }: 
         <Side letter="R" words="patient’s right" className="max-sm:justify-start" />
         {/* biome-ignore lint/performance/noImgElement: an optimiser must not resample what is being measured */}
         <img
-          decoding="async"
           draggable={false}
           {...image}
           alt={alt}

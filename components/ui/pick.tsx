@@ -30,7 +30,7 @@ export function Pick({ layout, label, detail, shortcut, isDisabled, isInvalid, o
   return (
     <label
       className={joinClasses(
-        "group/pick relative flex rounded-control border border-edge bg-sheet leading-[1.2] transition-colors duration-quick",
+        "group/pick relative flex rounded-control border border-edge bg-sheet leading-[1.2] transition-[background-color,border-color,color] duration-quick",
         "hover:border-ink has-checked:lit has-focus-visible:outline-3 has-focus-visible:outline-offset-2",
         "has-focus-visible:outline-cobalt has-disabled:border-dashed has-disabled:bg-transparent has-disabled:text-ink-3",
         isInvalid && "border-oxide",
