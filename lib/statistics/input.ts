@@ -6,9 +6,10 @@ export type Readings = readonly (number | null)[];
 /** One row for each subject, one column for each rater; null, or a row that ends early, where there is no rating. */
 export type Ratings = readonly Readings[];
 
-export function requireConfidence(confidence: number): void {
-  if (!(confidence > 0 && confidence < 1)) {
-    throw new InputError(`A confidence lies between 0 and 1, for example 0.95; got ${confidence}.`);
+/** Of a confidence, or of any other share that cannot be all or nothing. */
+export function requireConfidence(share: number, name = "confidence"): void {
+  if (!(share > 0 && share < 1)) {
+    throw new InputError(`${name} lies between 0 and 1, for example 0.95; got ${share}.`);
   }
 }
 

@@ -4,22 +4,19 @@ import { studentQuantile } from "./student";
 
 /** estimate ± z·SE; without an interval when the standard error is not finite. */
 export function normalInterval(estimate: number, standardError: number, confidence: number): Estimate {
-  if (!Number.isFinite(standardError)) return { estimate };
-  return around(estimate, standardError, normalQuantile(0.5 + confidence / 2));
+  return symmetricInterval(estimate, standardError, normalQuantile(0.5 + confidence / 2));
 }
 
 /** estimate ± t·SE; without an interval below one degree of freedom or when the standard error is not finite. */
 export function studentInterval(estimate: number, standardError: number, df: number, confidence: number): Estimate {
   if (!Number.isFinite(standardError)) return { estimate };
   if (!(df >= 1)) return { estimate, standardError };
-  return around(estimate, standardError, studentQuantile(0.5 + confidence / 2, df));
+  return symmetricInterval(estimate, standardError, studentQuantile(0.5 + confidence / 2, df));
 }
 
-function around(estimate: number, standardError: number, factor: number): Estimate {
-  return {
-    estimate,
-    standardError,
-    low: estimate - factor * standardError,
-    high: estimate + factor * standardError,
-  };
+/** estimate ± factor·SE, for many estimates that share a factor; without an interval when the SE is not finite. */
+export function symmetricInterval(estimate: number, standardError: number, factor: number): Estimate {
+  if (!Number.isFinite(standardError)) return { estimate };
+  const reach = factor * standardError;
+  return { estimate, standardError, low: estimate - reach, high: estimate + reach };
 }
