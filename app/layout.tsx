@@ -2,7 +2,7 @@ import type { Metadata, Viewport } from "next";
 import { cookies } from "next/headers";
 import type { ReactNode } from "react";
 import { SkipLink } from "@/components/shell/skip-link";
-import { parseTheme, THEME_COOKIE } from "@/components/shell/theme";
+import { parseTheme, THEME_COOKIE } from "@/lib/auth/theme";
 import { faceClasses } from "./fonts";
 import "./globals.css";
 

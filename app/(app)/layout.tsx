@@ -8,8 +8,8 @@ import { LANDING } from "@/lib/auth/roles";
 
 /** The head and foot of every page but the reading desk. Each page checks its own permission. */
 export default async function AppLayout({ children }: { children: ReactNode }) {
-  const { name, role, departmentId, departmentName, memberships } = await signedInActor();
-  const person = { name, role, departmentId, departmentName, memberships };
+  const { name, theme, role, departmentId, departmentName, memberships } = await signedInActor();
+  const person = { name, theme, role, departmentId, departmentName, memberships };
   return (
     <div className="flex min-h-dvh flex-col">
       <RunningHead homeHref={LANDING[role]} items={NAVIGATION[role]} person={<Person {...person} />} />

@@ -42,7 +42,7 @@ export function DegreesQuestion({ draft, onAnswer, name, showsKeys }: DegreesQue
             value={draft?.[`${part}Degrees`] ?? null}
             onChange={(value) => onAnswer({ question: `${part}Degrees`, value })}
             name={name}
-            keyPrefix={showsKeys ? (part === "vertical" && parts.length > 1 ? "⇧" : "") : null}
+            keyPrefix={showsKeys ? (part === "vertical" && parts.length > 1 ? "Shift " : "") : null}
           />
         ))}
       </div>

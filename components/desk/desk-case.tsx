@@ -114,7 +114,7 @@ export function DeskCase({ item, itemCount, instructions, saveState, onSave, onS
               onClick={save}
               className="grow"
             >
-              Save, next case <Kbd className="max-lg:hidden">⏎</Kbd>
+              Save, next case <Kbd className="max-lg:hidden">Enter</Kbd>
             </Button>
           </div>
         </div>

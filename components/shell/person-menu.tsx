@@ -1,4 +1,4 @@
-import type { ReactNode } from "react";
+import type { ComponentProps, ReactNode } from "react";
 import { Menu } from "@/components/ui/menu";
 import { MenuSection } from "@/components/ui/menu-items";
 import { ThemeSwitch } from "./theme-switch";
@@ -9,12 +9,13 @@ type PersonMenuProps = {
   place: string;
   /** Links to one's own pages, and other departments and roles: MenuSection with MenuLink or forms with MenuButton. */
   children?: ReactNode;
+  onThemeChange?: ComponentProps<typeof ThemeSwitch>["onThemeChange"];
   /** The way out, in a form of its own. */
   signOut: ReactNode;
 };
 
 /** Who is signed in, as what, and what can be changed about it from any page. */
-export function PersonMenu({ name, place, children, signOut }: PersonMenuProps) {
+export function PersonMenu({ name, place, children, onThemeChange, signOut }: PersonMenuProps) {
   const label = (
     <span className="min-w-0 leading-tight text-ink-2 sm:text-right">
       <b className="block truncate text-ink max-sm:max-w-36">{name}</b>
@@ -27,7 +28,7 @@ export function PersonMenu({ name, place, children, signOut }: PersonMenuProps) 
       {children}
       <MenuSection>
         <div className="py-2">
-          <ThemeSwitch />
+          <ThemeSwitch onThemeChange={onThemeChange} />
         </div>
       </MenuSection>
       <MenuSection>{signOut}</MenuSection>

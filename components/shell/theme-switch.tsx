@@ -2,7 +2,7 @@
 
 import { useId, useSyncExternalStore } from "react";
 import { ChoiceGroup } from "@/components/ui/choice-group";
-import { parseTheme, type Theme, themeCookie } from "./theme";
+import { parseTheme, type Theme, themeCookie } from "@/lib/auth/theme";
 
 const CHOICES: readonly { value: Theme; label: string }[] = [
   { value: "system", label: "System" },

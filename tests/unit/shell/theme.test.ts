@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { parseTheme, THEMES, themeCookie } from "@/components/shell/theme";
+import { parseTheme, THEMES, themeCookie } from "@/lib/auth/theme";
 
 describe("parseTheme", () => {
   it("reads back what the cookie keeps", () => {
