@@ -10,7 +10,7 @@ const HEAD = "border-b border-edge py-2 pr-4 text-left align-bottom text-small f
 export function ChartTable({ caption, columns, rows }: { caption: string; columns: ChartColumn[]; rows: ChartRow[] }) {
   const [head, ...rest] = columns;
   return (
-    <div className="overflow-x-auto">
+    <div className="overflow-x-auto [contain:inline-size]">
       <table className="w-full border-collapse border-t-2 border-b border-ink text-table">
         <caption className="pb-2 text-left text-small text-ink-2">{caption}</caption>
         <thead>

@@ -23,7 +23,7 @@ type ChartTextProps = {
   face?: keyof typeof FACES;
   anchor?: "start" | "middle" | "end";
   isStrong?: boolean;
-  /** A rim in sheet colour, for a label that may lie on a line or a point. */
+  /** A rim in the colour of the ground, for a label that may lie on a line or a point. */
   hasHalo?: boolean;
   children: ReactNode;
 };
@@ -50,7 +50,7 @@ export function ChartText({
         TONES[tone],
         FACES[face],
         isStrong && "font-semibold",
-        hasHalo && "stroke-sheet stroke-4 [paint-order:stroke] [stroke-linejoin:round]",
+        hasHalo && "stroke-surface stroke-4 [paint-order:stroke] [stroke-linejoin:round]",
       )}
     >
       {children}

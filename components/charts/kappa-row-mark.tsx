@@ -1,7 +1,7 @@
 import { ChartText } from "./chart-text";
 import { KAPPA_PX, type KappaLayout } from "./kappa-layout";
 import { isUnderFloor, type KappaRow, kappaText } from "./kappa-row";
-import { Dot, OpenDot, Triangle } from "./marks";
+import { Dot, intervalPath, OpenDot, Triangle } from "./marks";
 import { fitText } from "./place-labels";
 import type { PlotScale } from "./plot";
 import type { ChartBox } from "./use-chart-box";
@@ -84,11 +84,4 @@ export function KappaRowMark({ row, top, layout, floor, scale }: Omit<RowProps, 
       )}
     </g>
   );
-}
-
-/** An interval along x: an upright where it ends, or an arrow that points on beyond the axis where it is cut. */
-function intervalPath(low: number, high: number, y: number, { left, right }: PlotScale): string {
-  const lowEnd = low < left - 0.5 ? `M${left + 6} ${y - 5}L${left} ${y}l6 5` : `M${low} ${y - 5}v10`;
-  const highEnd = high > right + 0.5 ? `M${right - 6} ${y - 5}L${right} ${y}l-6 5` : `M${high} ${y - 5}v10`;
-  return `M${Math.max(left, low)} ${y}H${Math.min(right, high)}${lowEnd}${highEnd}`;
 }

@@ -7,21 +7,21 @@ export function Dot({ x, y, r, colour = "var(--ink)" }: Place & { r: number; col
 
 /** An open dot: other people's readings, and what is too few to say. */
 export function OpenDot({ x, y, r, colour = "var(--ink)" }: Place & { r: number; colour?: string }) {
-  return <circle cx={x} cy={y} r={r} fill="var(--sheet)" stroke={colour} strokeWidth={1.6} />;
+  return <circle cx={x} cy={y} r={r} fill="var(--surface)" stroke={colour} strokeWidth={1.6} />;
 }
 
 /** A warning. Its centre of mass lies on the point, `r` is about the radius of a dot of the same weight. */
 export function Triangle({ x, y, r, isOpen = false }: Place & { r: number; isOpen?: boolean }) {
   const points = `${x},${y - r * 1.35} ${x + r * 1.3},${y + r * 0.9} ${x - r * 1.3},${y + r * 0.9}`;
   if (!isOpen) return <polygon points={points} fill="var(--tawny)" />;
-  return <polygon points={points} fill="var(--sheet)" stroke="var(--tawny)" strokeWidth={2} strokeLinejoin="miter" />;
+  return <polygon points={points} fill="var(--surface)" stroke="var(--tawny)" strokeWidth={2} strokeLinejoin="miter" />;
 }
 
-/** Beyond an action limit. The edge in sheet colour parts it from a line drawn through it. */
+/** Beyond an action limit. The edge in the colour of its ground parts it from a line drawn through it. */
 export function Diamond({ x, y, r }: Place & { r: number }) {
   const reach = r * 1.6;
   const points = `${x},${y - reach} ${x + reach},${y} ${x},${y + reach} ${x - reach},${y}`;
-  return <polygon points={points} fill="var(--oxide)" stroke="var(--sheet)" strokeWidth={1.5} />;
+  return <polygon points={points} fill="var(--oxide)" stroke="var(--surface)" strokeWidth={1.5} />;
 }
 
 /** The reference: a ring with four spokes, known by its shape in grey and in print. */
@@ -30,16 +30,21 @@ export function ReferenceRing({ x, y, r }: Place & { r: number }) {
   const spokes = `M${x - outer} ${y}H${x - inner}M${x + inner} ${y}H${x + outer}M${x} ${y - outer}V${y - inner}M${x} ${y + inner}V${y + outer}`;
   return (
     <g fill="none" stroke="var(--cobalt)" strokeWidth={r * 0.23}>
-      <circle cx={x} cy={y} r={r} stroke="var(--sheet)" strokeWidth={r * 0.48} />
+      <circle cx={x} cy={y} r={r} stroke="var(--surface)" strokeWidth={r * 0.48} />
       <circle cx={x} cy={y} r={r} />
       <path d={spokes} />
     </g>
   );
 }
 
-type Whiskers = { from: number; to: number; across: number; endPx?: number };
-
-/** Path of an interval along x with an upright at each end. */
-export function whiskerPath({ from, to, across, endPx = 5 }: Whiskers): string {
-  return `M${from} ${across}H${to}M${from} ${across - endPx}v${2 * endPx}M${to} ${across - endPx}v${2 * endPx}`;
+/** An interval along x: an upright where it ends, or an arrow that points on beyond the axis where it is cut. */
+export function intervalPath(
+  low: number,
+  high: number,
+  y: number,
+  { left, right }: { left: number; right: number },
+): string {
+  const lowEnd = low < left - 0.5 ? `M${left + 6} ${y - 5}L${left} ${y}l6 5` : `M${low} ${y - 5}v10`;
+  const highEnd = high > right + 0.5 ? `M${right - 6} ${y - 5}L${right} ${y}l-6 5` : `M${high} ${y - 5}v10`;
+  return `M${Math.max(left, low)} ${y}H${Math.min(right, high)}${lowEnd}${highEnd}`;
 }
