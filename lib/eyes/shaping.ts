@@ -12,14 +12,19 @@ export function lerp(from: number, to: number, t: number): number {
   return from + (to - from) * t;
 }
 
+/** e to the −x. Most hills and bells are far away from most pixels: what is lost in rounding need not be computed. */
+function decay(x: number): number {
+  return x > 40 ? 0 : Math.exp(-x);
+}
+
 /** A bell of height 1 about 0. */
 export function bell(x: number, spread: number): number {
-  return Math.exp(-(x * x) / (2 * spread * spread));
+  return decay((x * x) / (2 * spread * spread));
 }
 
 /** A round hill of height 1 over the plane, with its own width along each axis. */
 export function hill(dx: number, widthX: number, dy: number, widthY: number): number {
-  return Math.exp(-((dx / widthX) ** 2) - (dy / widthY) ** 2);
+  return decay((dx / widthX) ** 2 + (dy / widthY) ** 2);
 }
 
 /** The value on the straight lines between knots that rise in x; level before the first and after the last. */
