@@ -15,7 +15,7 @@ export type DrawnPhotograph = {
   width: number;
   height: number;
   /** RGB bytes, row by row. */
-  data: Uint8Array;
+  data: Uint8Array<ArrayBuffer>;
   truth: PhotographTruth;
 };
 

@@ -4,7 +4,11 @@ import { createRandom } from "./random";
 import { bell, clamp, lerp } from "./shaping";
 
 /** What the camera makes of the light: fewer pixels, focus, a soft lens, exposure, tone and grain. Bytes, RGB. */
-export function takePhotograph(canvas: Canvas, settings: PhotographSettings, skinDepth: number): Uint8Array {
+export function takePhotograph(
+  canvas: Canvas,
+  settings: PhotographSettings,
+  skinDepth: number,
+): Uint8Array<ArrayBuffer> {
   let picture = scaleDown(canvas, settings);
   if (settings.blurPx > 0) picture = missFocus(picture, settings.blurPx);
   return develop(soften(picture), settings, settings.exposure ?? lerp(1.06, 1.34, skinDepth));
@@ -86,7 +90,7 @@ function soften(picture: Canvas): Canvas {
 }
 
 /** Exposure with darker corners, a shoulder for the highlights, and grain that is coarser along a row than across. */
-function develop(picture: Canvas, settings: PhotographSettings, exposure: number): Uint8Array {
+function develop(picture: Canvas, settings: PhotographSettings, exposure: number): Uint8Array<ArrayBuffer> {
   const { width, height, light } = picture;
   const { grain, warmth } = settings;
   const bytes = new Uint8Array(width * height * 3);
