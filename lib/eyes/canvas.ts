@@ -1,5 +1,8 @@
 import type { Rgb } from "./colour";
 
+/** In pixels from the top left corner of a picture. */
+export type PixelPoint = readonly [x: number, y: number];
+
 /** Linear light, three numbers a pixel, row by row. */
 export type Canvas = { width: number; height: number; light: Float32Array };
 

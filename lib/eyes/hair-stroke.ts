@@ -1,8 +1,6 @@
-import type { Canvas } from "./canvas";
+import type { Canvas, PixelPoint } from "./canvas";
 import type { Rgb } from "./colour";
 import { clamp, lerp } from "./shaping";
-
-export type PixelPoint = readonly [x: number, y: number];
 
 export type HairStroke = {
   /** Root, bend and tip of a quadratic curve, px. */

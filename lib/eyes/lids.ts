@@ -1,5 +1,5 @@
 import type { PhotographSettings, Side } from "./parameters";
-import type { Random } from "./random";
+import { createRandom, type Random } from "./random";
 import { type Point, type SampledCurve, sampleCurve } from "./sampled-curve";
 import { clamp, lerp } from "./shaping";
 
@@ -17,6 +17,11 @@ export type Lids = {
 
 const OUTER_CORNER_N = -14.4;
 const REACH_MM = 30;
+
+/** The stream of numbers of one eye. Its lids are drawn from it first. */
+export function createEyeRandom(seed: number, side: Side): Random {
+  return createRandom(seed * 131 + (side === "right" ? 11 : 23));
+}
 
 export function shapeLids(settings: PhotographSettings, side: Side, random: Random): Lids {
   const { esoDegrees, hyperDegrees, opening: eyeOpening } = settings[side];

@@ -1,11 +1,12 @@
+import type { PixelPoint } from "./canvas";
 import { linearFromHex, type Rgb } from "./colour";
 import { type EyePoint, type FacePoint, type LocatedEye, locateEyes, projectToView } from "./geometry";
 import { createIris, type IrisShader } from "./iris";
-import { type Lids, shapeLids } from "./lids";
+import { createEyeRandom, type Lids, shapeLids } from "./lids";
 import { createNoise, type Noise } from "./noise";
 import { SKIN, type SkinPalette } from "./palettes";
 import type { EyeSettings, PhotographSettings, Side } from "./parameters";
-import { createRandom, type Random } from "./random";
+import type { Random } from "./random";
 import { bell, clamp, smoothStep } from "./shaping";
 import { growVessels, type VesselMap } from "./vessels";
 
@@ -39,7 +40,7 @@ export type Scene = {
   eyes: Record<Side, SceneEye>;
   eyeAt(faceX: number): SceneEye;
   toFace(px: number, py: number): FacePoint;
-  toPixel(x: number, y: number): [px: number, py: number];
+  toPixel(x: number, y: number): PixelPoint;
 };
 
 export function setScene(settings: PhotographSettings): Scene {
@@ -80,11 +81,11 @@ export function setScene(settings: PhotographSettings): Scene {
   };
 }
 
-/** The numbers added to the seed keep right and left, iris and vessels, apart. */
+/** The figures about the seed keep right and left, iris and vessels, apart. */
 function setEye(settings: PhotographSettings, side: Side, located: LocatedEye): SceneEye {
   const { seed, epicanthus, browArch, browHeightMm, irisDiameterMm } = settings;
   const isRight = side === "right";
-  const random = createRandom(seed * 131 + (isRight ? 11 : 23));
+  const random = createEyeRandom(seed, side);
   const lids = shapeLids(settings, side, random);
   const platformMm = 2.7 * settings.crease * random.range(0.93, 1.07);
   const foldJitter = random.range(-0.1, 0.1);

@@ -1,7 +1,6 @@
+import type { PixelPoint } from "./canvas";
 import { type FacePoint, locateEyes } from "./geometry";
 import { completeParameters, type PhotographParameters, type Side } from "./parameters";
-
-export type PixelPoint = [x: number, y: number];
 
 export type EyeInPixels = {
   esoDegrees: number;
@@ -16,7 +15,7 @@ export type EyeInPixels = {
   pupilMargin: PixelPoint[];
 };
 
-/** Where everything truly lies in the picture: pixels from its top left corner, to a hundredth. */
+/** Where everything truly lies in the picture, to a hundredth of a pixel. */
 export type PhotographTruth = { pxPerMm: number; eyes: Record<Side, EyeInPixels> };
 
 /** Costs next to nothing: it needs the parameters only, not the picture. */
