@@ -19,8 +19,9 @@ export async function parseJson<Schema extends z.ZodType>(request: Request, sche
 
 export function parseShape<Schema extends z.ZodType>(value: unknown, schema: Schema): z.infer<Schema> {
   const parsed = schema.safeParse(value);
-  if (parsed.success) return parsed.data;
-  throw invalid("Some fields need to be changed.", fieldErrors(parsed.error));
+  const faults = parsed.success ? unstorableTexts(parsed.data) : parsed.error.issues;
+  if (parsed.success && faults.length === 0) return parsed.data;
+  throw invalid("Some fields need to be changed.", faults.map(toFieldError));
 }
 
 /** Path parameters. An id of the wrong shape names nothing, so it answers like a missing row. */
@@ -35,9 +36,18 @@ export function parseQuery<Schema extends z.ZodType>(request: Request, schema: S
   return parseShape(Object.fromEntries(new URL(request.url).searchParams), schema);
 }
 
-function fieldErrors(error: z.ZodError): FieldError[] {
-  return error.issues.map((issue) => ({
-    pointer: `#${issue.path.map((step) => `/${String(step).replaceAll("~", "~0").replaceAll("/", "~1")}`).join("")}`,
-    detail: issue.message,
-  }));
+type Fault = { path: readonly PropertyKey[]; message: string };
+
+function toFieldError({ path, message }: Fault): FieldError {
+  const steps = path.map((step) => `/${String(step).replaceAll("~", "~0").replaceAll("/", "~1")}`);
+  return { pointer: `#${steps.join("")}`, detail: message };
+}
+
+/** JSON can carry the character U+0000 and PostgreSQL cannot store it: without this it would end in a 500. */
+function unstorableTexts(value: unknown, path: readonly string[] = []): Fault[] {
+  if (typeof value === "string") {
+    return value.includes("\0") ? [{ path, message: "This text holds a character that cannot be stored." }] : [];
+  }
+  if (typeof value !== "object" || value === null) return [];
+  return Object.entries(value).flatMap(([name, part]) => unstorableTexts(part, [...path, name]));
 }
