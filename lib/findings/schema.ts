@@ -1,7 +1,8 @@
 import { z } from "zod";
 import { BEYOND_LIMBUS, DEGREES_MAX, type Finding, findingFaults, UNREADABLE_REASONS } from "@/lib/reflex/finding";
 
-const DegreesSchema = z.union([z.literal(BEYOND_LIMBUS), z.int().min(1).max(DEGREES_MAX)], {
+/** Which numbers they may be is a rule of the finding; checked here as well, it would be reported twice. */
+const DegreesSchema = z.union([z.literal(BEYOND_LIMBUS), z.number()], {
   error: `Degrees are whole numbers from 1 to ${DEGREES_MAX}, or >45 beyond the limbus.`,
 });
 
