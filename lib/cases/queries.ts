@@ -10,10 +10,11 @@ const LATEST_REFERENCE = `
     SELECT * FROM case_references WHERE case_references.case_id = cases.id ORDER BY revision DESC LIMIT 1
   ) latest ON TRUE`;
 
+/** Each case is of exactly one kind, the one that `caseKind` gives it. */
 const KIND_CONDITIONS: Record<CaseKind, string> = {
   aligned: "latest.readable AND latest.eye = 'none'",
-  eso: "latest.horizontal = 'eso'",
-  exo: "latest.horizontal = 'exo'",
+  eso: "latest.horizontal = 'eso' AND latest.vertical = 'none'",
+  exo: "latest.horizontal = 'exo' AND latest.vertical = 'none'",
   vertical: "latest.vertical <> 'none' AND latest.horizontal = 'none'",
   combined: "latest.vertical <> 'none' AND latest.horizontal <> 'none'",
   "not-readable": "NOT latest.readable",
