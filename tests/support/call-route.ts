@@ -1,8 +1,8 @@
 import { NextRequest } from "next/server";
 
-type Handler = (request: NextRequest, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
+export type Handler = (request: NextRequest, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
 
-type CallOptions = {
+export type CallOptions = {
   params?: Record<string, string>;
   query?: Record<string, string>;
   /** Sent as JSON, unless it is a form or a text. */

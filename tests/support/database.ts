@@ -4,16 +4,18 @@ import { Client } from "pg";
 import { afterAll, beforeAll, inject } from "vitest";
 import { closeDatabase, database } from "@/lib/database";
 import { changeEnv } from "@/lib/env";
+import { makeBucket } from "./bucket";
 
 /**
- * Gives the test file a migrated database of its own, empty, and the S3 stand-in; both are what the application's own
- * code finds. Call it at the top of the file; the answer gives the pool once the tests run.
+ * Gives the test file a migrated database of its own and a bucket of its own, both empty; they are what the
+ * application's own code finds. Call it at the top of the file; the answer gives the pool once the tests run.
  */
 export function useDatabase(): () => Knex {
   let made: TestDatabase | undefined;
   beforeAll(async () => {
     made = await createTestDatabase();
-    changeEnv({ ...testSettings(), DATABASE_URL: made.url });
+    const bucket = await makeBucket(inject("services").storage);
+    changeEnv({ ...testSettings(), DATABASE_URL: made.url, S3_BUCKET: bucket });
   });
   afterAll(async () => {
     await closeDatabase();
