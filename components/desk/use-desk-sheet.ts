@@ -6,12 +6,10 @@ import { fetchJson, type ProblemError } from "@/lib/http/fetch-json";
 
 export const deskSheetKey = (roundId: string) => `/api/desk/rounds/${roundId}`;
 
-/** A round in one's own order. It changes only by what is done here, so it is not fetched again while one reads. */
+/** A round in one's own order, fetched anew when a page opens; while one reads it changes only by what is done here. */
 export function useDeskSheet(roundId: string, initial: DeskSheet) {
   return useSWR<DeskSheet, ProblemError>(deskSheetKey(roundId), (url: string) => fetchJson(url, DeskSheetSchema), {
     fallbackData: initial,
     revalidateOnFocus: false,
-    revalidateIfStale: false,
-    revalidateOnMount: false,
   });
 }

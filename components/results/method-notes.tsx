@@ -1,4 +1,3 @@
-import { CONVENTION_NAMES } from "@/lib/departments/convention-names";
 import { formatNumber } from "@/lib/format/numbers";
 import type { RoundResults } from "@/lib/results/schema";
 
@@ -9,12 +8,11 @@ export function MethodNotes({ results }: { results: RoundResults }) {
     <section className="max-w-read text-small text-ink-2">
       <h2 className="mb-2.5 text-h3 text-ink">Methods</h2>
       <p>
-        Degrees are read by the {CONVENTION_NAMES[results.round.convention] ?? results.round.convention}. Direction
-        kappa compares eye, horizontal and vertical direction as one label, “not readable” among them; a purely vertical
-        deviation may be named on either eye. Its interval is asymptotic (Fleiss, Cohen and Everitt 1969). Steps are 0,
-        15, 30, 45 and beyond 45 degrees. Limits of agreement follow Bland and Altman 1999 on pairs that are both
-        readable and not beyond the limbus. Shares have Wilson intervals. Each case counts once; hidden repeats are left
-        out.
+        Convention of the degrees: {results.round.convention}. Direction kappa compares eye, horizontal and vertical
+        direction as one label, “not readable” among them; a purely vertical deviation may be named on either eye. Its
+        interval is asymptotic (Fleiss, Cohen and Everitt 1969). Steps are 0, 15, 30, 45 and beyond 45 degrees. Limits
+        of agreement follow Bland and Altman 1999 on pairs that are both readable and not beyond the limbus. Shares have
+        Wilson intervals. Each case counts once; hidden repeats are left out.
       </p>
       <p className="mt-2">
         Everybody together:{" "}

@@ -1,6 +1,8 @@
 import "server-only";
 import type { Knex } from "knex";
 import { findingColumnsOf, fromFindingColumns, toFindingColumns } from "@/lib/findings/columns";
+import type { ConventionName } from "@/lib/reflex/named-convention";
+import { conventionLabel } from "@/lib/rounds/convention-label";
 import type { RoundState } from "@/lib/rounds/schema";
 import type { DeskItem, DeskRound, DeskRoundState, ReadingInput, SavedReading } from "./schema";
 
@@ -13,7 +15,8 @@ type AssignmentRow = {
   number: number;
   title: string;
   instructions: string;
-  convention: string;
+  convention: ConventionName;
+  own_degrees_per_mm: string | null;
   state: RoundState;
   opens_at: Date;
   closes_at: Date;
@@ -37,6 +40,7 @@ function ownRounds(db: Knex, reader: Reader) {
       "rounds.title",
       "rounds.instructions",
       "rounds.convention",
+      "rounds.own_degrees_per_mm",
       "rounds.state",
       "rounds.opens_at",
       "rounds.closes_at",
@@ -77,8 +81,8 @@ export type OwnRound = DeskRound & { assignmentId: string; instructions: string;
 export async function findOwnRound(db: Knex, reader: Reader, roundId: string, now: Date): Promise<OwnRound | null> {
   const row = await ownRounds(db, reader).where("rounds.id", roundId).first();
   if (!row) return null;
-  const { assignment_id: assignmentId, instructions, convention } = row;
-  return { ...toDeskRound(row, now), assignmentId, instructions, convention };
+  const { assignment_id: assignmentId, instructions } = row;
+  return { ...toDeskRound(row, now), assignmentId, instructions, convention: conventionLabel(row) };
 }
 
 const READING_COLUMNS = [

@@ -2,6 +2,7 @@ import "server-only";
 import type { Knex } from "knex";
 import { type FindingColumns, findingColumnsOf, fromFindingColumns } from "@/lib/findings/columns";
 import type { Finding } from "@/lib/reflex/finding";
+import { conventionLabel } from "@/lib/rounds/convention-label";
 import type { ItemKind } from "@/lib/rounds/schema";
 import { type ExaminerFigures, ExaminerFiguresSchema, type PanelFigures, PanelFiguresSchema } from "./schema";
 
@@ -172,6 +173,7 @@ export type ResultRound = {
   number: number;
   title: string;
   state: string;
+  /** As it is named on the screen. */
   convention: string;
   releasedAt: Date | null;
   kappaFloor: number;
@@ -188,7 +190,7 @@ export async function findResultRound(db: Knex, departmentId: string, roundId: s
     number: row.number,
     title: row.title,
     state: row.state,
-    convention: row.convention,
+    convention: conventionLabel(row),
     releasedAt: row.released_at,
     kappaFloor: Number(row.kappa_floor),
   };
