@@ -15,9 +15,9 @@ export function agreementWeights(weighting: Weighting, size: number): number[][]
   );
 }
 
-/** 1 less the agreement weights: what a disagreement costs, 0 on the diagonal. */
-export function disagreementWeights(weighting: Weighting, size: number): number[][] {
-  return agreementWeights(weighting, size).map((row) => row.map((weight) => 1 - weight));
+/** 1 less the agreement weights, row after row: what a disagreement costs, 0 on the diagonal. */
+export function disagreementsFor(weighting: Weighting, size: number): Float64Array {
+  return Float64Array.from(agreementWeights(weighting, size).flat(), (weight) => 1 - weight);
 }
 
 function weightFunction(weighting: Weighting, stepsMax: number): (steps: number) => number {

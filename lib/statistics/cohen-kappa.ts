@@ -1,8 +1,8 @@
-import { disagreementWeights, type Weighting } from "./agreement-weights";
-import { type CountTable, columnSums, requireSquareCounts, sum } from "./count-tables";
+import { disagreementsFor, type Weighting } from "./agreement-weights";
+import { type CountTable, requireSquareCounts } from "./count-tables";
 import { requireConfidence } from "./input";
 import { normalInterval } from "./intervals";
-import { kappaMoments } from "./kappa-moments";
+import { type FlatTable, flatten, type KappaMoments, kappaMoments, kappaVariances } from "./kappa-moments";
 import { type Estimate, type Result, refuse } from "./result";
 
 export type CohenKappaOptions = { weights?: Weighting; confidence?: number };
@@ -38,44 +38,54 @@ export function cohenKappa(table: CountTable, options: CohenKappaOptions = {}): 
   const { weights = "none", confidence = 0.95 } = options;
   requireSquareCounts(table, "the table");
   requireConfidence(confidence);
-  return kappaOfTable(table, disagreementWeights(weights, table.length), weights === "none", confidence);
+  return kappaOfTable(flatten(table), disagreementsFor(weights, table.length), confidence, weights === "none");
 }
 
 /** The same of a table known to be sound, for callers with many tables of one size: the weights are worked out once. */
 export function kappaOfTable(
-  table: CountTable,
-  disagreements: CountTable,
-  unweighted: boolean,
+  table: FlatTable,
+  disagreements: Float64Array,
   confidence: number,
+  unweighted: boolean,
 ): Result<CohenKappa> {
-  const n = sum(table.map(sum));
-  if (n === 0) return refuse(0, "no case was read by both");
-  const moments = kappaMoments(table, n, disagreements);
-  if (!moments) return refuse(n, "one category only");
-  const estimate = 1 - moments.observed / moments.expected;
-  const standardError = Math.sqrt(moments.variance / n);
-  return {
+  const moments = kappaMoments(table, disagreements);
+  const estimate = kappaOrReason(moments);
+  const { n } = moments;
+  if (typeof estimate === "string") return refuse(n, estimate);
+  const { variance, varianceNull } = kappaVariances(table, disagreements, moments);
+  const standardError = Math.sqrt(variance / n);
+  const result: { ok: true; n: number } & CohenKappa = {
     ok: true,
     n,
     // One case says nothing of how kappa would vary, though the formula has a standard error of 0 for it.
     kappa: n > 1 ? normalInterval(estimate, standardError, confidence) : { estimate, standardError },
-    standardErrorNull: Math.sqrt(moments.varianceNull / n),
+    standardErrorNull: Math.sqrt(varianceNull / n),
     observed: 1 - moments.observed,
     expected: 1 - moments.expected,
-    ...(unweighted ? unweightedIndices(table, n, moments.expected) : {}),
-    ...(table.length === 2 ? twoByTwoIndices(table, n) : {}),
   };
+  if (unweighted) {
+    result.maximum = 1 - forcedDisagreement(moments) / moments.expected;
+    result.pabak = (table.size * result.observed - 1) / (table.size - 1);
+  }
+  if (table.size === 2) {
+    const [a = 0, b = 0, c = 0, d = 0] = table.cells;
+    result.prevalenceIndex = (a - d) / n;
+    result.biasIndex = (b - c) / n;
+  }
+  return result;
 }
 
-function unweightedIndices(table: CountTable, n: number, expectedDisagreement: number) {
-  const columns = columnSums(table);
-  // Margins that differ force this much disagreement even on raters who agree wherever they can.
-  const forced = sum(table.map((row, i) => Math.abs(sum(row) - (columns[i] ?? 0)))) / (2 * n);
-  const size = table.length;
-  const observed = sum(table.map((row, i) => row[i] ?? 0)) / n;
-  return { maximum: 1 - forced / expectedDisagreement, pabak: (size * observed - 1) / (size - 1) };
+/** The figure alone, or why there is none. */
+export function kappaOrReason({ n, observed, expected }: KappaMoments): number | string {
+  if (n === 0) return "no case was read by both";
+  return expected === 0 ? "one category only" : 1 - observed / expected;
 }
 
-function twoByTwoIndices([[a = 0, b = 0] = [], [c = 0, d = 0] = []]: CountTable, n: number) {
-  return { prevalenceIndex: (a - d) / n, biasIndex: (b - c) / n };
+/** Margins that differ force this much disagreement even on raters who agree wherever they can. */
+function forcedDisagreement({ n, rows, columns }: KappaMoments): number {
+  let apart = 0;
+  for (let category = 0; category < rows.length; category += 1) {
+    apart += Math.abs((rows[category] ?? 0) - (columns[category] ?? 0));
+  }
+  return apart / (2 * n);
 }

@@ -33,10 +33,9 @@ export function sum(values: readonly number[]): number {
 
 export function columnSums(table: CountTable): number[] {
   const sums = new Array<number>(table[0]?.length ?? 0).fill(0);
-  for (const row of table)
-    row.forEach((value, column) => {
-      sums[column] = (sums[column] ?? 0) + value;
-    });
+  for (const row of table) {
+    for (let column = 0; column < sums.length; column += 1) sums[column] = (sums[column] ?? 0) + (row[column] ?? 0);
+  }
   return sums;
 }
 

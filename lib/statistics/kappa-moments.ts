@@ -1,50 +1,101 @@
-import { type CountTable, columnSums, dot, sum } from "./count-tables";
+/** A square table row after row: the cell of row i and column j is `cells[i * size + j]`. */
+export type FlatTable = { size: number; cells: Float64Array };
 
-/** What kappa and its two large-sample variances are made of, for one table. */
+export function flatten(table: readonly (readonly number[])[]): FlatTable {
+  return { size: table.length, cells: Float64Array.from(table.flat()) };
+}
+
+/** The disagreements that kappa = 1 − observed/expected compares. */
 export type KappaMoments = {
+  /** The sum of the cells, of each row and of each column. */
+  n: number;
+  rows: Float64Array;
+  columns: Float64Array;
   /** Weighted disagreement seen, and expected of raters who agree by chance alone: 1 less the usual agreements. */
   observed: number;
   expected: number;
-  /** n times the variance of kappa, not assuming that kappa is 0: for intervals. */
-  variance: number;
-  /** n times the variance of kappa when it is 0: for tests. */
-  varianceNull: number;
 };
 
 /**
- * The disagreements behind weighted kappa = 1 − observed/expected, and its variances by the delta method.
+ * What kappa is made of, plain or weighted.
  *
- * Shape: `cells[row][column]` as counts with `total` their sum, or as proportions with total 1; `disagreements` is
- * symmetric, of the same size, 0 on the diagonal (1 less the agreement weight): in these terms no digits are lost as
- * agreement nears 1. Variances are null where chance agreement is complete, and kappa 0/0.
- * Source: Fleiss, Cohen & Everitt, Psychological Bulletin 1969; 72: 323-327.
+ * Shape: counts or proportions; `disagreements` is a table of the same size, symmetric, 0 on the diagonal (1 less the
+ * agreement weight). In these terms no digits are lost as agreement nears 1, and `expected` is exactly 0 where both
+ * raters used one and the same category. Plain loops over flat tables: a panel of 500 has 125,000 pairs of raters.
  */
-export function kappaMoments(cells: CountTable, total: number, disagreements: CountTable): KappaMoments | null {
-  const shares = cells.map((row) => row.map((count) => count / total));
-  const rows = shares.map(sum);
-  const columns = columnSums(shares);
-  const rowMeans = disagreements.map((row) => dot(row, columns));
-  const columnMeans = disagreements.map((row) => dot(row, rows));
-  const observed = sum(shares.map((row, i) => dot(row, disagreements[i] ?? [])));
-  const expected = dot(rows, rowMeans);
-  if (expected === 0) return null;
-
-  const chance = rows.map((row) => columns.map((column) => row * column));
-  const meanOf = (i: number, j: number) => (rowMeans[i] ?? 0) + (columnMeans[j] ?? 0);
-  const weightOf = (i: number, j: number) => disagreements[i]?.[j] ?? 0;
-  // Each cell's influence on kappa; the mean over the table is known, so one pass gives the variance.
-  const variance = spread(shares, observed * expected, (i, j) => observed * meanOf(i, j) - expected * weightOf(i, j));
-  const varianceNull = spread(chance, expected, (i, j) => meanOf(i, j) - weightOf(i, j));
-  return { observed, expected, variance: variance / expected ** 4, varianceNull: varianceNull / expected ** 2 };
+export function kappaMoments(table: FlatTable, disagreements: Float64Array): KappaMoments {
+  const { n, rows, columns } = margins(table);
+  const observed = dot(table.cells, disagreements) / n;
+  const expected = dot(rows, disagreementsWith(disagreements, columns)) / (n * n);
+  return { n, rows, columns, observed, expected };
 }
 
-function spread(shares: number[][], mean: number, influence: (i: number, j: number) => number): number {
+/**
+ * n times the variance of kappa by the delta method: `variance` without assuming that kappa is 0, for intervals, and
+ * `varianceNull` when it is, for tests. Only where `expected` is above 0.
+ * Source: Fleiss, Cohen & Everitt, Psychological Bulletin 1969; 72: 323-327.
+ */
+export function kappaVariances(table: FlatTable, disagreements: Float64Array, moments: KappaMoments) {
+  const { size, cells } = table;
+  const { n, rows, columns, observed, expected } = moments;
+  const rowCosts = disagreementsWith(disagreements, columns);
+  const columnCosts = disagreementsWith(disagreements, rows);
+  // A cell's influence on kappa is a·(row cost + column cost)/n − b·disagreement, with a = observed and b = expected
+  // (both 1 under chance), and has a known mean over the table: one pass gives both variances.
   let squares = 0;
-  shares.forEach((row, i) => {
-    row.forEach((share, j) => {
-      if (share > 0) squares += share * (influence(i, j) - mean) ** 2;
-    });
-  });
-  // Below this the spread is rounding: raters who are both constant have exactly none.
-  return squares < 1e-12 * (squares + mean ** 2) ? 0 : squares;
+  let squaresNull = 0;
+  for (let i = 0; i < size; i += 1) {
+    const inRow = rows[i] ?? 0;
+    if (inRow === 0) continue;
+    const rowPart = (rowCosts[i] ?? 0) / n - expected;
+    for (let j = 0; j < size; j += 1) {
+      const part = rowPart + (columnCosts[j] ?? 0) / n;
+      const disagreement = disagreements[i * size + j] ?? 0;
+      const influence = observed * part - expected * disagreement;
+      squares += (cells[i * size + j] ?? 0) * influence * influence;
+      squaresNull += inRow * (columns[j] ?? 0) * (part - disagreement) * (part - disagreement);
+    }
+  }
+  return {
+    variance: clearRounding(squares / n, observed * expected) / expected ** 4,
+    varianceNull: clearRounding(squaresNull / (n * n), expected) / expected ** 2,
+  };
+}
+
+/** Below this a spread is rounding: raters who are both constant have exactly none. */
+function clearRounding(squares: number, mean: number): number {
+  return squares < 1e-12 * (squares + mean * mean) ? 0 : squares;
+}
+
+function margins({ size, cells }: FlatTable): Pick<KappaMoments, "n" | "rows" | "columns"> {
+  const rows = new Float64Array(size);
+  const columns = new Float64Array(size);
+  let n = 0;
+  for (let i = 0; i < size; i += 1) {
+    for (let j = 0; j < size; j += 1) {
+      const count = cells[i * size + j] ?? 0;
+      n += count;
+      rows[i] = (rows[i] ?? 0) + count;
+      columns[j] = (columns[j] ?? 0) + count;
+    }
+  }
+  return { n, rows, columns };
+}
+
+/** What each category costs against all the counts of the other rater; over n, the 1969 paper's w̄. */
+function disagreementsWith(disagreements: Float64Array, counts: Float64Array): Float64Array {
+  const size = counts.length;
+  const costs = new Float64Array(size);
+  for (let i = 0; i < size; i += 1) {
+    let cost = 0;
+    for (let j = 0; j < size; j += 1) cost += (disagreements[i * size + j] ?? 0) * (counts[j] ?? 0);
+    costs[i] = cost;
+  }
+  return costs;
+}
+
+function dot(first: Float64Array, second: Float64Array): number {
+  let total = 0;
+  for (let index = 0; index < first.length; index += 1) total += (first[index] ?? 0) * (second[index] ?? 0);
+  return total;
 }
