@@ -37,6 +37,8 @@ export default function settings(phase) {
     serverExternalPackages: ["knex", "pg", "graphile-worker", "sharp", "@node-rs/argon2", "@aws-sdk/client-s3"],
     // Photographs are served by our own handlers. Next's optimiser would keep copies of them on the disk.
     images: { unoptimized: true },
+    // The tests check the types of everything; a first start need not wait for that.
+    typescript: { ignoreBuildErrors: true },
     // next dev otherwise writes files into the checkout.
     agentRules: false,
     headers: async () => [

@@ -1,5 +1,5 @@
 import { randomBytes, randomUUID } from "node:crypto";
-import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from "node:fs";
+import { existsSync, mkdirSync, readFileSync, renameSync, rmdirSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { z } from "zod";
 import { makeReachable } from "../db/server/postgres-user";
@@ -47,6 +47,7 @@ function keepsItsCluster(kept: LocalState | undefined, checkout: string): kept i
 function chooseClusterFolder(folder: string, runAs: RunAs | undefined): string {
   const inside = path.join(folder, "postgres");
   if (makeReachable(inside, runAs)) return inside;
+  rmdirSync(inside);
   return path.join("/var/lib/postgresql", `evenglint-${randomUUID()}`);
 }
 

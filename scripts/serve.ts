@@ -6,7 +6,7 @@ import { buildApplication } from "./build-application";
 import { choosePort } from "./choose-port";
 import { startLocalServices } from "./local-services";
 import { newLog } from "./paths";
-import { parentGone, Services } from "./services";
+import { npmGone, Services } from "./services";
 import { signInLines } from "./sign-in-lines";
 
 type Mode = "start" | "dev";
@@ -16,7 +16,7 @@ type Announce = (state: { state: "starting" | "running" | "stopping"; address?: 
 export async function serve(mode: Mode, isFromNpm: boolean, announce: Announce): Promise<void> {
   const services = new Services(() => announce({ state: "stopping" }));
   services.stopOnSignals();
-  if (isFromNpm) void parentGone().then(() => services.stop(0));
+  if (isFromNpm) void npmGone().then(() => services.stop(0));
   try {
     await startEverything(mode, services, announce);
   } catch (error) {
@@ -43,7 +43,8 @@ async function startEverything(mode: Mode, services: Services, announce: Announc
   if (mode === "start") await buildApplication();
   const output = (name: string) => (mode === "dev" ? "inherit" : { logFile: newLog(name) });
   const keep = (tied: TiedProcess) => {
-    services.add({ ended: tied.ended, stop: () => stopTied(tied) });
+    const ended = tied.ended.then((ending) => `${ending}. ${tied.recentOutput()}`);
+    services.add({ ended, stop: () => stopTied(tied) });
     return tied;
   };
   keep(startWorker(settings, output("worker")));

@@ -1,3 +1,4 @@
+import { readFileSync } from "node:fs";
 import { setTimeout as sleep } from "node:timers/promises";
 
 export type Service = { ended: Promise<string>; stop(): Promise<void> };
@@ -13,7 +14,7 @@ export class Services {
   add = (service: Service): void => {
     this.running.push(service);
     void service.ended.then((ending) => {
-      if (!this.stopping) this.fail(`${ending}. Everything is stopped; the logs are in .local/logs.`);
+      if (!this.stopping) this.fail(`${ending}\nEverything is stopped, since a part of it has ended.`);
     });
   };
 
@@ -48,8 +49,21 @@ export class Services {
   }
 }
 
-/** Resolves when the process that started ours has gone, as when only npm is killed and we would run on unseen. */
-export async function parentGone(): Promise<void> {
-  const parent = process.ppid;
-  while (process.ppid === parent) await sleep(500, undefined, { ref: false });
+/**
+ * Resolves when npm, which started us through a shell, has gone: when it alone is killed, nobody would see us run on.
+ * A shell that waits for us stays then, so its parent is watched too.
+ */
+export async function npmGone(): Promise<void> {
+  const before = ancestors();
+  while (ancestors() === before) await sleep(500, undefined, { ref: false });
+}
+
+function ancestors(): string {
+  try {
+    const [, name = "", parent = ""] =
+      /\((.*)\) \S (\d+)/.exec(readFileSync(`/proc/${process.ppid}/stat`, "utf8")) ?? [];
+    return name.endsWith("sh") ? `${process.ppid} of ${parent}` : String(process.ppid);
+  } catch {
+    return "none";
+  }
 }

@@ -22,7 +22,7 @@ export type TiedProcess = {
   child: ChildProcess;
   /** Settles with a sentence about how it ended. Never rejects. */
   ended: Promise<string>;
-  /** The end of its log, for a message about its failure. */
+  /** Where its log is, and how it ends: for a message about a failure. */
   recentOutput(): string;
 };
 
@@ -47,8 +47,13 @@ export function startTied(options: TiedOptions): TiedProcess {
     child.once("error", (error) => resolve(`${name} could not be started: ${error.message}`));
     child.once("exit", (code, signal) => resolve(`${name} ended with ${signal ?? `code ${code}`}`));
   });
-  const recentOutput = () => (logFile ? readFileSync(logFile, "utf8").split("\n").slice(-30).join("\n").trim() : "");
+  const recentOutput = () => (logFile === undefined ? "" : endOf(logFile));
   return { name, child, ended, recentOutput };
+}
+
+function endOf(logFile: string): string {
+  const lines = readFileSync(logFile, "utf8").trim().split("\n").slice(-40);
+  return `The end of ${logFile}:\n${lines.join("\n")}`;
 }
 
 export function hasEnded({ child }: TiedProcess): boolean {
