@@ -21,13 +21,8 @@ export function ExaminerMultiples({ board, measure, chosen, onChoose }: Examiner
   const ordered = [...board.examiners].sort(
     (a, b) => STATE_ORDER.indexOf(latestState(a[measure])) - STATE_ORDER.indexOf(latestState(b[measure])),
   );
-  const values = board.examiners.flatMap((row) => row[measure].points.flatMap(({ value }) => value?.estimate ?? []));
-  const reach = board.examiners.flatMap((row) =>
-    row[measure].points.flatMap(({ lowerAction, upperAction }) => [lowerAction ?? [], upperAction ?? []].flat()),
-  );
-  const span: [number, number] = [Math.min(...values, ...reach), Math.max(...values, ...reach)];
   const { valueLabel, format } = measureOf(measure);
-  const scale = span.map((end) => (format === "kappa" ? formatNumber(end, 2) : `${formatSigned(end)}°`)).join(" to ");
+  const span = commonSpan(board, measure);
   return (
     <section aria-labelledby="multiples">
       <p id="multiples" className="mb-3.5 max-w-read font-serif leading-[1.35]">
@@ -71,6 +66,19 @@ export function ExaminerMultiples({ board, measure, chosen, onChoose }: Examiner
       </ul>
     </section>
   );
+}
+
+/** The span of all values and limits; undefined while no examiner has a figure. */
+function commonSpan(board: DriftBoard, measure: DriftMeasure): [low: number, high: number] | undefined {
+  const ends = board.examiners
+    .flatMap((row) => row[measure].points)
+    .flatMap(({ value, lowerAction, upperAction }) => [value?.estimate, lowerAction, upperAction])
+    .filter((end) => end !== undefined);
+  return ends.length === 0 ? undefined : [Math.min(...ends), Math.max(...ends)];
+}
+
+function spanText(span: [number, number], format: "kappa" | "degrees"): string {
+  return span.map((end) => (format === "kappa" ? formatNumber(end, 2) : `${formatSigned(end)}°`)).join(" to ");
 }
 
 function LatestFigure({ chart, format }: { chart: DriftChart; format: "kappa" | "degrees" }) {

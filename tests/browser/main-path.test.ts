@@ -87,7 +87,7 @@ describe("the main job, end to end", () => {
     await page.getByLabel("Work address").fill(person.email);
     await page.getByLabel("Password").fill(PASSWORD);
     await page.getByRole("button", { name: "Sign in" }).click();
-    await page.waitForURL((url) => !url.pathname.startsWith("/sign-in"));
+    await page.waitForURL(({ pathname }) => pathname !== "/" && !pathname.startsWith("/sign-in"));
     return page;
   }
 
@@ -130,7 +130,7 @@ describe("the main job, end to end", () => {
     await page
       .getByLabel("Photograph")
       .setInputFiles({ name: "notes.jpg", mimeType: "image/jpeg", buffer: Buffer.from("no picture") });
-    await page.getByText("The eyes are drawn").click();
+    await page.getByRole("radio", { name: /The eyes are drawn/ }).check();
     await page.getByLabel("Code").fill(codeOf(0));
     await answerByButtons(page, scores[0]?.reference ?? 0);
     await page.getByLabel("Rests on").selectOption({ label: "Expert panel" });
