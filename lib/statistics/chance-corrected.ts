@@ -1,6 +1,7 @@
 import { type CountTable, columnSums, dot, sum } from "./count-tables";
 import { studentInterval } from "./intervals";
 import { type Estimate, type Result, refuse } from "./result";
+import { sumOfSquares, withoutRounding } from "./rounding";
 
 export type ChanceCorrected = { coefficient: Estimate; observed: number; expected: number };
 
@@ -46,7 +47,10 @@ export function chanceCorrected(
     const gain = agreement === null ? 0 : ((n / paired.length) * (agreement - expected)) / (1 - expected);
     return gain - (2 * (1 - estimate) * (ownChance - expected)) / (1 - expected);
   });
-  const standardError = Math.sqrt(squaresAround(estimate, contributions) / (n * (n - 1)));
+  const squares = sumOfSquares(contributions.map((contribution) => contribution - estimate));
+  // Subjects who all say the same of agreement have no spread, but for rounding.
+  const spread = withoutRounding(squares, sumOfSquares(contributions));
+  const standardError = Math.sqrt(spread / (n * (n - 1)));
   return {
     ok: true,
     n,
@@ -70,10 +74,4 @@ export function subjectAgreement(counts: readonly number[], weights: CountTable)
 function toShares(counts: readonly number[]): number[] {
   const total = sum(counts);
   return counts.map((count) => count / total);
-}
-
-function squaresAround(center: number, values: readonly number[]): number {
-  const squares = sum(values.map((value) => (value - center) ** 2));
-  // Below this the spread is rounding: subjects who all say the same of agreement have exactly none.
-  return squares < 1e-12 * sum(values.map((value) => value ** 2)) ? 0 : squares;
 }

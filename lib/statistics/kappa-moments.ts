@@ -1,3 +1,5 @@
+import { withoutRounding } from "./rounding";
+
 /** A square table row after row: the cell of row i and column j is `cells[i * size + j]`. */
 export type FlatTable = { size: number; cells: Float64Array };
 
@@ -56,15 +58,10 @@ export function kappaVariances(table: FlatTable, disagreements: Float64Array, mo
       squaresNull += inRow * (columns[j] ?? 0) * (part - disagreement) * (part - disagreement);
     }
   }
-  return {
-    variance: clearRounding(squares / n, observed * expected) / expected ** 4,
-    varianceNull: clearRounding(squaresNull / (n * n), expected) / expected ** 2,
-  };
-}
-
-/** Below this a spread is rounding: raters who are both constant have exactly none. */
-function clearRounding(squares: number, mean: number): number {
-  return squares < 1e-12 * (squares + mean * mean) ? 0 : squares;
+  // Raters who are both constant have no spread, but for rounding, around the known means.
+  const spread = withoutRounding(squares / n, (observed * expected) ** 2);
+  const spreadNull = withoutRounding(squaresNull / (n * n), expected ** 2);
+  return { variance: spread / expected ** 4, varianceNull: spreadNull / expected ** 2 };
 }
 
 function margins({ size, cells }: FlatTable): Pick<KappaMoments, "n" | "rows" | "columns"> {

@@ -3,6 +3,7 @@ import { type CountTable, columnSums, dot, sum } from "./count-tables";
 import { requireConfidence } from "./input";
 import { codeRatings, countByCategory, type Label, type LabelRatings } from "./labels";
 import { type Estimate, InputError, type Result, refuse } from "./result";
+import { withoutCancellation } from "./rounding";
 
 /** How far apart two labels are: merely different, by their ranks in all ratings, or by their difference. */
 export type AlphaMetric = "nominal" | "ordinal" | "interval";
@@ -107,10 +108,14 @@ function squaredDistances(counts: readonly number[], values: readonly number[]):
   }
   const mean = total / size;
   let squares = 0;
+  let squaredNumbers = 0;
   for (let category = 0; category < counts.length; category += 1) {
-    squares += (counts[category] ?? 0) * ((values[category] ?? 0) - origin - mean) ** 2;
+    const count = counts[category] ?? 0;
+    const value = values[category] ?? 0;
+    squares += count * (value - origin - mean) ** 2;
+    squaredNumbers += count * value ** 2;
   }
-  return 2 * size * squares;
+  return 2 * size * withoutCancellation(squares, squaredNumbers);
 }
 
 /** Ratings before a category plus half of its own: the distance between two is Krippendorff's ordinal one. */

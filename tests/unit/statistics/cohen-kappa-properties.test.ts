@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { cohenKappa } from "@/lib/statistics/cohen-kappa";
+import { intraclassCorrelation } from "@/lib/statistics/intraclass-correlation";
 import { freeze } from "./arbitrary-ratings";
 import { near, nearEstimate } from "./near";
 
@@ -93,6 +94,28 @@ describe("cohenKappa always", () => {
     );
   });
 
+  it("is, with quadratic weights, Lin's concordance of the category numbers, and nears the ICC as cases grow", () => {
+    fc.assert(
+      fc.property(squareTable, (table) => {
+        const rows = table.flatMap((row, i) => row.flatMap((count, j) => new Array<number[]>(count).fill([i, j])));
+        const [first, second] = [rows.map(([i = 0]) => i), rows.map(([, j = 0]) => j)];
+        const kappa = expectOk(cohenKappa(table, { weights: "quadratic" })).kappa.estimate;
+        const meanSquare = mean(rows.map(([i = 0, j = 0]) => (i - j) ** 2));
+        const apart = (mean(first) - mean(second)) ** 2;
+        // Fleiss & Cohen 1973: 1 less the mean squared difference over what chance would give.
+        expect(kappa).toEqual(near(1 - meanSquare / (spread(first) + spread(second) + apart)));
+        const icc = (ratings: number[][]) => {
+          const result = intraclassCorrelation(ratings);
+          if (!result.ok) throw new Error(result.reason);
+          return result.icc21?.estimate ?? Number.NaN;
+        };
+        const copies = (times: number) => Array.from({ length: times }, () => rows).flat();
+        expect(Math.abs(kappa - icc(copies(50)))).toBeLessThan(2 / (50 * rows.length));
+      }),
+      { numRuns: 20 },
+    );
+  });
+
   it("has the standard error of the delta method, with slopes taken numerically from the definition", () => {
     fc.assert(
       fc.property(squareTable, weighting, (table, weights) => {
@@ -115,6 +138,15 @@ function expectOk(result: ReturnType<typeof cohenKappa>) {
 }
 
 type Weights = "none" | "linear" | "quadratic";
+
+function mean(values: number[]): number {
+  return values.reduce((total, value) => total + value, 0) / values.length;
+}
+
+function spread(values: number[]): number {
+  const center = mean(values);
+  return mean(values.map((value) => (value - center) ** 2));
+}
 
 /** Kappa straight from its definition, by sums over all cells; written apart from the code under test. */
 function definition(cells: number[][], weights: Weights): number {

@@ -86,6 +86,14 @@ describe("krippendorffAlpha at the edges", () => {
     }
   });
 
+  it("takes numbers that differ by rounding alone for the same measurement", () => {
+    const noisy = [
+      [0.3, 0.1 + 0.2],
+      [0.1 + 0.2, 0.3],
+    ];
+    expect(krippendorffAlpha(noisy, { metric: "interval" })).toEqual({ ok: false, n: 2, reason: "one category only" });
+  });
+
   it("is not moved by a label that only lone ratings have", () => {
     // The lone 9 stands in no pair; with it in the margins alpha would differ.
     expect(krippendorffAlpha(ratings("1 2 | 2 2 | 9 ."), nominal)).toEqual(
