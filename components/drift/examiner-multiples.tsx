@@ -26,8 +26,8 @@ export function ExaminerMultiples({ board, measure, chosen, onChoose }: Examiner
   return (
     <section aria-labelledby="multiples">
       <p id="multiples" className="mb-3.5 max-w-read font-serif leading-[1.35]">
-        <b>Fig. 2</b> The same for every examiner, on one scale ({scale}). Those beyond a limit in their latest round
-        come first. Choose one to see it large.
+        <b>Fig. 2</b> The same for every examiner{span && `, on one scale (${spanText(span, format)})`}. Those beyond a
+        limit in their latest round come first. Choose one to see it large.
       </p>
       <ul className="grid grid-cols-1 border-t border-l border-hair sm:grid-cols-2 lg:grid-cols-3 xl:grid-cols-4">
         {ordered.map((row) => (
