@@ -23,8 +23,8 @@ export async function createCase(
 ): Promise<string> {
   const photograph = await normalisePhotograph(upload.body);
   const storageKey = `photographs/${crypto.randomUUID()}`;
-  await putObject(storageKey, photograph.body, "image/jpeg");
   try {
+    await putObject(storageKey, photograph.body, "image/jpeg"); // may be kept although its answer is lost
     return await db.transaction(async (trx) => {
       const photographId = await insertPhotograph(trx, {
         departmentId: actor.departmentId,
