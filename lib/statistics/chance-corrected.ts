@@ -39,7 +39,6 @@ export function chanceCorrected(
   const expected = chanceAgreement(panelShares, panelShares);
   if (expected === 1) return refuse(n, "one category only");
   const estimate = (observed - expected) / (1 - expected);
-  if (n === 1) return { ok: true, n, coefficient: { estimate }, observed, expected };
 
   // What each subject adds to the coefficient: these average to the estimate, and their spread is its variance.
   const contributions = agreements.map((agreement, subject) => {
@@ -48,7 +47,7 @@ export function chanceCorrected(
     return gain - (2 * (1 - estimate) * (ownChance - expected)) / (1 - expected);
   });
   const squares = sumOfSquares(contributions.map((contribution) => contribution - estimate));
-  // Subjects who all say the same of agreement have no spread, but for rounding.
+  // Subjects who all say the same of agreement have no spread, but for rounding; a single one has 0/0, and no interval.
   const spread = withoutRounding(squares, sumOfSquares(contributions));
   const standardError = Math.sqrt(spread / (n * (n - 1)));
   return {
