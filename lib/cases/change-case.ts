@@ -4,7 +4,7 @@ import { appendAudit } from "@/lib/audit/append-audit";
 import type { Actor } from "@/lib/auth/actor";
 import { notFound } from "@/lib/errors";
 import { enqueue } from "@/lib/jobs/enqueue";
-import { closedRoundsWithCase } from "@/lib/results/queries";
+import { publishedRoundsWithCase } from "@/lib/results/queries";
 import { insertReference, lockCase, updateCaseRow } from "./queries";
 import type { CaseChange, ReferenceRevision } from "./schema";
 
@@ -19,7 +19,7 @@ export async function changeCase(db: Knex, actor: Actor, caseId: string, change:
 
 /**
  * Gives a case a new reference. The old revision stays, and results computed with it stay too; closed rounds that show
- * the case get a new revision of their results.
+ * the case get a new revision of their results (for rounds still open the job finds nothing to do).
  */
 export async function reviseReference(
   db: Knex,
@@ -38,7 +38,7 @@ export async function reviseReference(
       detail: { revision: next, reason: revision.reason },
       at: now,
     });
-    for (const roundId of await closedRoundsWithCase(trx, caseId)) {
+    for (const roundId of await publishedRoundsWithCase(trx, caseId)) {
       const reason = `reference of a case revised: ${revision.reason}`;
       await enqueue(trx, "compute-results", { roundId, reason }, { key: `results:${roundId}` });
     }

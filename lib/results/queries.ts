@@ -196,12 +196,17 @@ export async function findResultRound(db: Knex, departmentId: string, roundId: s
   };
 }
 
-/** Closed and released rounds that show a case: those whose results rest on its reference. */
-export async function closedRoundsWithCase(db: Knex, caseId: string): Promise<string[]> {
+/**
+ * Rounds whose results rest, or will rest, on the reference of a case. Open ones are among them: one may be closing at
+ * this moment, with results that cannot see a reference not committed yet. Always in one order, so that two who queue
+ * jobs for the same rounds do not wait for each other.
+ */
+export async function publishedRoundsWithCase(db: Knex, caseId: string): Promise<string[]> {
   const rows = await db("items")
     .join("rounds", "rounds.id", "items.round_id")
     .where("items.case_id", caseId)
-    .whereIn("rounds.state", ["closed", "released"])
-    .distinct("rounds.id");
+    .whereNot("rounds.state", "draft")
+    .distinct("rounds.id")
+    .orderBy("rounds.id");
   return rows.map(({ id }) => id);
 }
