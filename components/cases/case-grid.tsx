@@ -1,7 +1,7 @@
 import Link from "next/link";
 import { PhotographThumb } from "@/components/ui/photograph-thumb";
+import { caseLabel } from "@/lib/cases/case-kind";
 import type { CaseSummary } from "@/lib/cases/schema";
-import { shorthand } from "@/lib/reflex/shorthand";
 
 export function CaseGrid({ cases }: { cases: CaseSummary[] }) {
   return (
@@ -10,12 +10,12 @@ export function CaseGrid({ cases }: { cases: CaseSummary[] }) {
         <li key={each.id}>
           <Link
             href={`/cases/${each.id}`}
-            className="block border border-hair bg-sheet text-ink no-underline hover:border-ink"
+            className="block h-full border border-hair bg-sheet text-ink no-underline hover:border-ink"
           >
             <PhotographThumb src={`${each.photographHref}?size=small`} width={640} height={280} alt="" />
             <span className="flex flex-wrap items-baseline gap-x-2.5 px-3 py-2 text-small">
               <b className="font-mono">{each.code}</b>
-              <span className="font-mono">{shorthand(each.finding, "tropia")}</span>
+              <span className="font-mono">{caseLabel(each.finding)}</span>
               <span className="ml-auto text-ink-2">{caseUse(each)}</span>
             </span>
           </Link>

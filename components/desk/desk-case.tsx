@@ -2,7 +2,7 @@
 
 import { type ReactNode, useState } from "react";
 import { Button } from "@/components/ui/button";
-import { ChoiceGroup } from "@/components/ui/choice-group";
+import { FilterChip, FilterChips } from "@/components/ui/filter-chips";
 import { Kbd } from "@/components/ui/kbd";
 import { Notice } from "@/components/ui/notice";
 import { Photograph } from "@/components/ui/photograph";
@@ -71,7 +71,7 @@ export function DeskCase({ item, itemCount, instructions, saveState, onSave, onS
         width={item.width}
         height={item.height}
         alt={`Case ${item.place} of ${itemCount}, photograph of both eyes, reading exercise`}
-        className="max-h-[54dvh] w-auto"
+        className="max-h-[46dvh] w-auto"
       />
       {saveState.kind === "failed" && (
         <Notice
@@ -82,25 +82,27 @@ export function DeskCase({ item, itemCount, instructions, saveState, onSave, onS
           {saveState.problem.detail} What you entered stays on this screen.
         </Notice>
       )}
-      <div className="grid gap-x-6 gap-y-6 px-margin py-5 lg:grid-cols-[1fr_1fr_1fr_1.5fr_1.1fr]">
+      <div className="grid gap-x-6 gap-y-6 px-margin py-5 lg:grid-cols-2 xl:grid-cols-[1fr_1fr_0.7fr_1.6fr_1.15fr] xl:divide-x xl:divide-hair xl:gap-x-0 xl:[&>*]:px-5 xl:[&>*:first-child]:pl-0 xl:[&>*:last-child]:pr-0">
         {draft.isReadable ? (
-          <FindingQuestions draft={draft} onAnswer={give} showsKeys />
+          <FindingQuestions draft={draft} onAnswer={give} isDesk />
         ) : (
-          <div className="lg:col-span-4">
+          <div className="xl:col-span-4">
             <UnreadableQuestion reason={draft.reason} onAnswer={give} showsKeys />
           </div>
         )}
-        <div className="flex flex-col gap-3 max-lg:sticky max-lg:bottom-0 max-lg:-mx-(--page-margin) max-lg:border-t max-lg:border-edge max-lg:bg-paper max-lg:px-margin max-lg:py-3">
+        <div className="flex flex-col gap-3 max-xl:sticky max-xl:bottom-0 max-xl:-mx-(--page-margin) max-xl:border-t max-xl:border-edge max-xl:bg-paper max-xl:px-margin max-xl:py-3 lg:max-xl:col-span-2">
           <Readback draft={draft} />
-          <ChoiceGroup
-            legend="How sure?"
-            name="confidence"
-            choices={CONFIDENCES}
-            value={confidence}
-            onChange={setConfidence}
-            className="max-lg:hidden"
-          />
-          <div className="mt-auto flex gap-2 lg:flex-col">
+          <FilterChips label="How sure?" className="max-xl:hidden">
+            {CONFIDENCES.map(({ value, label }) => (
+              <FilterChip
+                key={value}
+                label={label}
+                isOn={confidence === value}
+                onToggle={() => setConfidence(confidence === value ? null : value)}
+              />
+            ))}
+          </FilterChips>
+          <div className="mt-auto flex gap-2 xl:flex-col">
             {draft.isReadable && (
               <Button size="desk" aria-keyshortcuts="Q" onClick={() => give({ question: "readable", value: false })}>
                 Not readable

@@ -9,7 +9,8 @@ type FindingQuestionsProps = {
   onAnswer: (answer: Answer) => void;
   /** Two or more desks of questions on one page need names of their own. */
   name?: string;
-  showsKeys?: boolean;
+  /** At the desk: with the keys that answer, and arranged for a wide screen. */
+  isDesk?: boolean;
 };
 
 const EYES = [
@@ -31,10 +32,10 @@ const VERTICALS = [
 ] as const;
 
 /** The four questions of a readable finding: eye, horizontal, vertical, degrees. The desk and the reference share them. */
-export function FindingQuestions({ draft, onAnswer, name = "finding", showsKeys = false }: FindingQuestionsProps) {
+export function FindingQuestions({ draft, onAnswer, name = "finding", isDesk = false }: FindingQuestionsProps) {
   const readable = draft.isReadable ? draft : null;
   const keyed = <Value extends { shortcut: string }>(choices: readonly Value[]) =>
-    choices.map((choice) => (showsKeys ? choice : { ...choice, shortcut: undefined }));
+    choices.map((choice) => (isDesk ? choice : { ...choice, shortcut: undefined }));
   const isAligned = readable?.eye === "none";
   return (
     <>
@@ -42,6 +43,7 @@ export function FindingQuestions({ draft, onAnswer, name = "finding", showsKeys 
         legend={<QuestionLegend number={1}>Which eye deviates?</QuestionLegend>}
         legendLook="question"
         name={`${name}-eye`}
+        columns={isDesk ? "desk-pair" : 3}
         choices={keyed(EYES)}
         value={readable?.eye ?? null}
         onChange={(value) => onAnswer({ question: "eye", value })}
@@ -50,6 +52,7 @@ export function FindingQuestions({ draft, onAnswer, name = "finding", showsKeys 
         legend={<QuestionLegend number={2}>Horizontal</QuestionLegend>}
         legendLook="question"
         name={`${name}-horizontal`}
+        columns={isDesk ? "desk-pair" : 3}
         choices={keyed(HORIZONTALS)}
         value={readable?.horizontal ?? null}
         onChange={(value) => onAnswer({ question: "horizontal", value })}
@@ -59,12 +62,13 @@ export function FindingQuestions({ draft, onAnswer, name = "finding", showsKeys 
         legend={<QuestionLegend number={3}>Vertical</QuestionLegend>}
         legendLook="question"
         name={`${name}-vertical`}
+        columns={isDesk ? "desk-stack" : 3}
         choices={keyed(VERTICALS)}
         value={readable?.vertical ?? null}
         onChange={(value) => onAnswer({ question: "vertical", value })}
         className={isAligned ? "opacity-60" : undefined}
       />
-      <DegreesQuestion draft={readable} onAnswer={onAnswer} name={name} showsKeys={showsKeys} />
+      <DegreesQuestion draft={readable} onAnswer={onAnswer} name={name} showsKeys={isDesk} />
     </>
   );
 }

@@ -74,7 +74,10 @@ function commonSpan(board: DriftBoard, measure: DriftMeasure): [low: number, hig
     .flatMap((row) => row[measure].points)
     .flatMap(({ value, lowerAction, upperAction }) => [value?.estimate, lowerAction, upperAction])
     .filter((end) => end !== undefined);
-  return ends.length === 0 ? undefined : [Math.min(...ends), Math.max(...ends)];
+  if (ends.length === 0) return undefined;
+  const [low, high] = [Math.min(...ends), Math.max(...ends)];
+  const margin = (high - low || 1) * 0.06; // so that no mark is cut at the edge
+  return [low - margin, high + margin];
 }
 
 function spanText(span: [number, number], format: "kappa" | "degrees"): string {

@@ -53,7 +53,7 @@ export function DegreesPlot({ label, whose, component, figures, limits }: Degree
   return (
     <Figure
       label={label}
-      caption={`Degrees, reading against reference, ${component} (${sign}): ${whose}, ${limits.n} pairs. Mean and limits of agreement with 95 % bands; the area of a dot counts readings.`}
+      caption={`Degrees, reading against reference, ${component} (${sign}), where the direction agrees: ${whose}, ${limits.n} pairs. Mean and limits of agreement with 95 % bands; the area of a dot counts readings.`}
       table={<BlandAltmanTable {...shared} />}
     >
       <BlandAltmanPlot {...shared} isTooFew={limits.n < READINGS_FEW} />

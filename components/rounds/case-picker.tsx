@@ -4,9 +4,8 @@ import { useState } from "react";
 import { FilterChip, FilterChips } from "@/components/ui/filter-chips";
 import { joinClasses } from "@/components/ui/join-classes";
 import { PhotographThumb } from "@/components/ui/photograph-thumb";
-import { CASE_KIND_NAMES, caseKind } from "@/lib/cases/case-kind";
+import { CASE_KIND_NAMES, caseKind, caseLabel } from "@/lib/cases/case-kind";
 import { CASE_KINDS, type CaseKind, type CaseSummary } from "@/lib/cases/schema";
-import { shorthand } from "@/lib/reflex/shorthand";
 
 type CasePickerProps = { cases: CaseSummary[]; chosen: string[]; onToggle: (caseId: string) => void };
 
@@ -54,7 +53,7 @@ function CaseCard({ each, isChosen, onToggle }: CaseCardProps) {
     <li>
       <label
         className={joinClasses(
-          "block cursor-pointer border bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-cobalt",
+          "block h-full cursor-pointer border bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-cobalt",
           isChosen ? "border-ink shadow-[inset_0_0_0_1px_var(--ink)]" : "border-hair hover:border-edge",
         )}
       >
@@ -71,7 +70,7 @@ function CaseCard({ each, isChosen, onToggle }: CaseCardProps) {
             {isChosen && <span className="glint size-1.5 bg-lit-glint" />}
           </span>
           <b className="font-mono">{each.code}</b>
-          <span className="font-mono">{shorthand(each.finding, "tropia")}</span>
+          <span className="font-mono">{caseLabel(each.finding)}</span>
           <span className="ml-auto text-ink-2">
             {each.isAnchor ? "anchor" : each.lastRoundNumber ? `round ${each.lastRoundNumber}` : "new"}
           </span>

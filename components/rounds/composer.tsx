@@ -70,7 +70,10 @@ export function Composer({ round, cases, people, zone }: ComposerProps) {
           chosen={chosen}
           onToggle={(caseId) => change({ items: toggleCase(draft.items, caseId) })}
         />
-        <Sheet as="section" className="grid gap-6 max-lg:order-first">
+        <Sheet
+          as="section"
+          className="grid gap-6 max-lg:order-first lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:overflow-y-auto"
+        >
           <RoundFields draft={draft} zone={zone} onChange={change} errorOf={(field) => failure?.fieldError(field)} />
           <BalanceTable cases={cases.filter(({ id }) => chosen.includes(id))} items={draft.items} />
           <ExaminerPicker

@@ -11,16 +11,8 @@ type Case = Scorecard["cases"][number];
 export function ScoredCase({ each }: { each: Case }) {
   return (
     <li className="grid gap-x-6 gap-y-3 border-b border-hair py-5 first:border-t sm:grid-cols-2 lg:grid-cols-[20rem_minmax(0,1fr)_17rem]">
-      {each.pictureHref && each.reference ? (
+      {each.pictureHref && each.reference && (
         <OpenCase each={each} pictureHref={each.pictureHref} reference={each.reference} />
-      ) : (
-        <div className="lg:col-span-3">
-          <h3 className="text-h3">Case {each.place}</h3>
-          <p className="mt-1 text-ink-2">
-            This case is shown again in a round that is still sealed. Photograph, reference and your reading come back
-            here when that round is released.
-          </p>
-        </div>
       )}
     </li>
   );
@@ -37,6 +29,7 @@ function OpenCase({ each, pictureHref, reference }: OpenCaseProps) {
         width={each.width}
         height={each.height}
         ratio={2.29}
+        className="self-start"
         alt={`Case ${place}: ${describeFinding(reference)} ${explainReflex(reference)}`}
       />
       <div>

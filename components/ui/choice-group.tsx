@@ -25,15 +25,30 @@ type ChoiceGroupProps<Value extends string> = {
   /** tiles: label at the foot, detail under it; rows: one line each, glint before the label. */
   layout?: PickLayout;
   /** On a phone, rows always stand one below the other. */
-  columns?: 1 | 2 | 3 | 4;
+  columns?: 1 | 2 | 3 | 4 | "desk-pair" | "desk-stack";
   isDisabled?: boolean;
   error?: string | null;
   className?: string;
 };
 
 const COLUMNS = {
-  tiles: { 1: "grid-cols-1", 2: "grid-cols-2", 3: "grid-cols-3", 4: "grid-cols-4" },
-  rows: { 1: "grid-cols-1", 2: "sm:grid-cols-2", 3: "sm:grid-cols-3", 4: "sm:grid-cols-2 lg:grid-cols-4" },
+  tiles: {
+    1: "grid-cols-1",
+    2: "grid-cols-2",
+    3: "grid-cols-3",
+    4: "grid-cols-4",
+    // At the desk: three in a row, and where there is height two with the third across, or one below the other.
+    "desk-pair": "grid-cols-3 xl:grid-cols-2 xl:[&>*:last-child]:col-span-2",
+    "desk-stack": "grid-cols-3 xl:grid-cols-1",
+  },
+  rows: {
+    1: "grid-cols-1",
+    2: "sm:grid-cols-2",
+    3: "sm:grid-cols-3",
+    4: "sm:grid-cols-2 lg:grid-cols-4",
+    "desk-pair": "grid-cols-1",
+    "desk-stack": "grid-cols-1",
+  },
 };
 const LEGENDS = {
   label: "mb-1.5 text-small font-semibold",

@@ -3,7 +3,7 @@ import { ALIGNED, DEGREES_MAX, type Degrees, type Finding, type ReadableFinding 
 /**
  * How an invented examiner misreads. The shares are assumptions for the demo, not measurements: about 98% right
  * directions on clear deviations, 90% from 5 to 10 degrees and 70% below; degrees a slope of the true ones with a
- * spread of 2 degrees and a tenth of the size, and a habit of rounding to 5.
+ * spread of 2.3 degrees and a tenth of the size, and a habit of rounding to 5.
  */
 export type ReadingHabit = "steady" | "ordinary" | "sliding" | "misses-verticals" | "learning" | "reverses-then-learns";
 
@@ -18,7 +18,7 @@ type Traits = {
 };
 
 const CERTIFIED: Traits = {
-  slope: 0.92,
+  slope: 0.89,
   biasDegrees: 0,
   reverses: 0.01,
   swapsEye: 0.01,
@@ -32,7 +32,7 @@ export function traitsOf(habit: ReadingHabit, round: number): Traits {
   const untaught = Math.max(0, 1 - round / 4);
   switch (habit) {
     case "steady":
-      return { ...CERTIFIED, slope: 0.97, missesVertical: 0.02, callsSquint: 0.03 };
+      return { ...CERTIFIED, slope: 0.95, missesVertical: 0.02, callsSquint: 0.03 };
     case "ordinary":
       return CERTIFIED;
     case "sliding":
@@ -106,7 +106,7 @@ function chanceSeen(degrees: number): number {
 
 function estimate(truth: Degrees | null, traits: Traits, random: () => number): Degrees {
   const size = truth === ">45" ? 52 : (truth ?? 0);
-  const read = traits.slope * size + traits.biasDegrees + (2 + 0.08 * size) * gauss(random);
+  const read = traits.slope * size + traits.biasDegrees + (2.3 + 0.1 * size) * gauss(random);
   if (read > DEGREES_MAX + 2.5) return ">45";
   const rounded = random() < 0.6 ? 5 * Math.round(read / 5) : Math.round(read);
   return Math.min(DEGREES_MAX, Math.max(1, rounded));

@@ -53,14 +53,25 @@ export function demoRounds(now: Date): DemoRound[] {
 
 export type LibraryCase = { id: string; isAnchor: boolean };
 
-/** Cases of one round: every anchor, others by the luck of a seeded draw, two hidden repeats and a mirrored one. */
+const DRAWN_COUNT = 18;
+
+/**
+ * Cases of one round: every anchor, others in a seeded order of which each round takes the next eighteen, two hidden
+ * repeats and a mirrored one.
+ */
 export function chooseItems(library: readonly LibraryCase[], round: number): RoundDraft["items"] {
-  const random = seededRandom(100 + round);
+  const random = seededRandom(100);
   const others = library.filter(({ isAnchor }) => !isAnchor).map(({ id }) => ({ id, luck: random() }));
-  const drawn = others.sort((a, b) => a.luck - b.luck).slice(0, 18);
-  const anchors = library.filter(({ isAnchor }) => isAnchor);
-  const firsts = [...anchors, ...drawn].map(({ id }) => ({ caseId: id, kind: "first" as const }));
-  const repeats = drawn.slice(0, 2).map(({ id }) => ({ caseId: id, kind: "repeat" as const }));
-  const mirrored = drawn.slice(2, 3).map(({ id }) => ({ caseId: id, kind: "mirrored" as const }));
-  return [...firsts, ...repeats, ...mirrored];
+  const ordered = others.sort((a, b) => a.luck - b.luck);
+  const drawn = ordered
+    .map((_, index) => ordered[(index + round * DRAWN_COUNT) % ordered.length] ?? ordered[0])
+    .slice(0, DRAWN_COUNT);
+  const ids = drawn.flatMap((each) => each?.id ?? []);
+  const items = (kind: "first" | "repeat" | "mirrored", of: string[]) => of.map((caseId) => ({ caseId, kind }));
+  const anchors = library.filter(({ isAnchor }) => isAnchor).map(({ id }) => id);
+  return [
+    ...items("first", [...anchors, ...ids]),
+    ...items("repeat", ids.slice(0, 2)),
+    ...items("mirrored", ids.slice(2, 3)),
+  ];
 }

@@ -1,5 +1,6 @@
 import type { Finding } from "@/lib/reflex/finding";
 import { findingParts } from "@/lib/reflex/finding-parts";
+import { shorthand } from "@/lib/reflex/shorthand";
 import type { CaseKind } from "./schema";
 
 export const CASE_KIND_NAMES: Record<CaseKind, string> = {
@@ -18,4 +19,9 @@ export function caseKind(finding: Finding): CaseKind {
   if (horizontal && vertical) return "combined";
   if (vertical) return "vertical";
   return horizontal?.direction ?? "aligned";
+}
+
+/** A finding as it labels a picture in a list: in shorthand; why a picture cannot be read stands on the case's own page. */
+export function caseLabel(finding: Finding): string {
+  return finding.readable ? shorthand(finding, "tropia") : "not readable";
 }

@@ -28,19 +28,24 @@ function componentFigures(items: readonly ShownItem[], component: "horizontal" |
 }
 
 /**
- * Bias and limits of the size alone (degrees, without direction) where the direction of the larger part of the
- * reference was read right: a reversed direction is a blunder to be counted, not a size to be averaged.
+ * Bias and limits of the size alone (degrees, without direction) of the larger part of the reference, where its
+ * direction was read right. Aligned pairs have no size and are left out.
  */
 export function sizeFigures(items: readonly ShownItem[]): DegreesFigures {
   return figuresOf(items.map(compareSize));
 }
 
+/**
+ * The two signed components, compared where both are readable, not beyond the limbus and of one direction (none counts
+ * as one). A reversed or missed direction is a blunder to be counted: one of them would outweigh every honest estimate.
+ */
 export function compareComponent({ reading, reference }: ShownItem, component: "horizontal" | "vertical"): Compared {
   if (!reading) return "unread";
   if (!reading.readable || !reference.readable) return "notReadable";
   const read = signedComponents(reading)[component];
   const assigned = signedComponents(reference)[component];
-  return read === null || assigned === null ? "beyondLimbus" : { reading: read, reference: assigned };
+  if (read === null || assigned === null) return "beyondLimbus";
+  return Math.sign(read) === Math.sign(assigned) ? { reading: read, reference: assigned } : "otherDirection";
 }
 
 function compareSize({ reading, reference }: ShownItem): Compared {

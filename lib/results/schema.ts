@@ -35,7 +35,7 @@ export const LeftOutSchema = z.object({
   unread: z.number(),
   notReadable: z.number(),
   beyondLimbus: z.number(),
-  /** Only where sizes are compared: the direction differs, or neither has one. */
+  /** The direction differs; for sizes also where neither has one. */
   otherDirection: z.number(),
 });
 

@@ -19,8 +19,8 @@ export default async function SignInPage({ searchParams }: PageProps<"/sign-in">
     <div className="flex min-h-dvh flex-col">
       <main id="main" tabIndex={-1} className="grow outline-none">
         <header className="flex flex-wrap items-end justify-between gap-x-10 gap-y-3 px-margin pt-7 pb-4.5 lg:px-16">
-          <h1 className="text-masthead font-normal">
-            <Wordmark />
+          <h1>
+            <Wordmark className="text-masthead font-normal" />
           </h1>
           <p className="max-w-[26ch] font-serif text-standfirst text-balance text-ink-2 italic lg:text-right">
             Calibration rounds for the corneal light reflex test
