@@ -1,0 +1,130 @@
+import type { CasePlan } from "./demo-case";
+
+/** Thirteen divergent pairs: every step in either eye, and sizes between. */
+export const EXO_CASES: CasePlan[] = [
+  {
+    code: "047",
+    note: "Small left exo: the reflexes differ by about a third of a millimetre.",
+    parameters: { seed: 124, age: 0.15, skin: "C", iris: "green", pupilMm: 3.3, left: { esoDegrees: -3 } },
+  },
+  {
+    code: "014",
+    note: "Right exo, reflex inside the pupil, nasal of the other one.",
+    parameters: {
+      seed: 125,
+      brow: 0.75,
+      skin: "E",
+      iris: "brown",
+      pupilMm: 4.0,
+      fieldMm: 121,
+      right: { esoDegrees: -6 },
+    },
+  },
+  {
+    code: "031",
+    note: "Right exo, reflex at the nasal pupil margin.",
+    parameters: {
+      seed: 126,
+      age: 0.9,
+      hairColour: "#77706a",
+      skin: "A",
+      iris: "grey",
+      pupilMm: 3.5,
+      tiltDegrees: -2,
+      right: { esoDegrees: -15 },
+    },
+  },
+  {
+    code: "048",
+    note: "Right exo, reflex on the iris near the pupil.",
+    isAnchor: true,
+    parameters: { seed: 127, skin: "D", iris: "amber", pupilMm: 3.2, fieldMm: 118, right: { esoDegrees: -21 } },
+  },
+  {
+    code: "015",
+    note: "Right exo, reflex midway between pupil margin and limbus.",
+    parameters: {
+      seed: 128,
+      skin: "B",
+      iris: "hazel",
+      pupilMm: 3.6,
+      freckles: 0.4,
+      hairColour: "#7a4a2c",
+      right: { esoDegrees: -30 },
+    },
+  },
+  {
+    code: "032",
+    note: "Right exo, reflex just inside the nasal limbus.",
+    parameters: { seed: 129, skin: "F", iris: "amber", pupilMm: 3.4, fieldMm: 120, right: { esoDegrees: -42 } },
+  },
+  {
+    code: "049",
+    note: "Right exo, reflex at the nasal limbus.",
+    parameters: { seed: 130, brow: 1.25, skin: "C", iris: "umber", pupilMm: 3.8, right: { esoDegrees: -45 } },
+  },
+  {
+    code: "016",
+    note: "Right exo, reflex on the nasal sclera.",
+    parameters: { seed: 132, skin: "B", iris: "green", pupilMm: 3.7, fieldMm: 117, right: { esoDegrees: -52 } },
+  },
+  {
+    code: "033",
+    note: "Left exo, reflex between pupil centre and nasal margin.",
+    parameters: {
+      seed: 133,
+      brow: 1.3,
+      lash: 0.8,
+      skin: "D",
+      iris: "brown",
+      pupilMm: 3.9,
+      tiltDegrees: 1.5,
+      left: { esoDegrees: -11 },
+    },
+  },
+  {
+    code: "050",
+    note: "Left exo, reflex at the nasal pupil margin.",
+    parameters: {
+      seed: 134,
+      age: 0.7,
+      skin: "F",
+      iris: "umber",
+      pupilMm: 3.5,
+      fieldMm: 121,
+      left: { esoDegrees: -15 },
+    },
+  },
+  {
+    code: "017",
+    note: "Left exo, reflex midway between pupil margin and limbus.",
+    parameters: {
+      seed: 135,
+      hairColour: "#4a3122",
+      skin: "A",
+      iris: "blue",
+      pupilMm: 3.1,
+      pupilDistanceMm: 64,
+      left: { esoDegrees: -30 },
+    },
+  },
+  {
+    code: "034",
+    note: "Left exo, reflex at the nasal limbus.",
+    isAnchor: true,
+    parameters: { seed: 136, skin: "E", iris: "umber", pupilMm: 3.6, left: { esoDegrees: -45 } },
+  },
+  {
+    code: "001",
+    note: "Left exo, reflex on the nasal sclera.",
+    parameters: {
+      seed: 137,
+      skin: "C",
+      iris: "brown",
+      pupilMm: 4.0,
+      fieldMm: 118,
+      tiltDegrees: 1,
+      left: { esoDegrees: -57 },
+    },
+  },
+];
