@@ -1,3 +1,4 @@
+import { beyondChance } from "./beyond-chance";
 import { type CountTable, columnSums, dot, sum } from "./count-tables";
 import { studentInterval } from "./intervals";
 import { type Estimate, type Result, refuse } from "./result";
@@ -38,7 +39,7 @@ export function chanceCorrected(
   const observed = sum(paired) / paired.length;
   const expected = chanceAgreement(panelShares, panelShares);
   if (expected === 1) return refuse(n, "one category only");
-  const estimate = (observed - expected) / (1 - expected);
+  const estimate = beyondChance(observed - expected, 1 - expected);
 
   // What each subject adds to the coefficient: these average to the estimate, and their spread is its variance.
   const contributions = agreements.map((agreement, subject) => {
@@ -47,8 +48,9 @@ export function chanceCorrected(
     return gain - (2 * (1 - estimate) * (ownChance - expected)) / (1 - expected);
   });
   const squares = sumOfSquares(contributions.map((contribution) => contribution - estimate));
-  // Subjects who all say the same of agreement have no spread, but for rounding; a single one has 0/0, and no interval.
-  const spread = withoutRounding(squares, sumOfSquares(contributions));
+  // Subjects who all say the same of agreement have no spread, but for rounding (full agreement contributes 1); a single
+  // one has 0/0, and no interval.
+  const spread = withoutRounding(squares, n);
   const standardError = Math.sqrt(spread / (n * (n - 1)));
   return {
     ok: true,

@@ -1,4 +1,5 @@
 import { disagreementsFor, type Weighting } from "./agreement-weights";
+import { beyondChance } from "./beyond-chance";
 import { type CountTable, requireSquareCounts } from "./count-tables";
 import { requireConfidence } from "./input";
 import { normalInterval } from "./intervals";
@@ -78,10 +79,7 @@ export function kappaOfTable(
 /** The figure alone, or why there is none. */
 export function kappaOrReason({ n, observed, expected }: KappaMoments): number | string {
   if (n === 0) return "no case was read by both";
-  if (expected === 0) return "one category only";
-  const gain = expected - observed;
-  // A rater who is constant gives exactly 0, which fractions of weights miss by rounding.
-  return Math.abs(gain) < 1e-12 * expected ? 0 : gain / expected;
+  return expected === 0 ? "one category only" : beyondChance(expected - observed, expected);
 }
 
 /** Margins that differ force this much disagreement even on raters who agree wherever they can. */

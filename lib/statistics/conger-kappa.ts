@@ -1,4 +1,5 @@
 import { agreementWeights } from "./agreement-weights";
+import { beyondChance } from "./beyond-chance";
 import { subjectAgreement } from "./chance-corrected";
 import { columnSums, sum } from "./count-tables";
 import { type CodedRatings, codeRatings, countByCategory, type LabelRatings } from "./labels";
@@ -24,7 +25,7 @@ export function congerKappa(ratings: LabelRatings): Result<{ kappa: Estimate }> 
   const observed = sum(agreements) / agreements.length;
   const expected = chanceOfOwnHabits(raterShares(coded));
   if (expected === 1) return refuse(n, "one category only");
-  return { ok: true, n, kappa: { estimate: (observed - expected) / (1 - expected) } };
+  return { ok: true, n, kappa: { estimate: beyondChance(observed - expected, 1 - expected) } };
 }
 
 /** Raters × categories: which part of a rater's own readings each category is. */

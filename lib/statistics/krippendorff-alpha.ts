@@ -1,3 +1,4 @@
+import { beyondChance } from "./beyond-chance";
 import { bootstrapInterval } from "./bootstrap";
 import { type CountTable, columnSums, dot, sum } from "./count-tables";
 import { requireConfidence } from "./input";
@@ -93,7 +94,7 @@ function disagreements(units: CountTable, distanceSum: DistanceSum): Disagreemen
 }
 
 function alphaOf({ observedDisagreement, expectedDisagreement }: Disagreements): number {
-  return 1 - observedDisagreement / expectedDisagreement;
+  return beyondChance(expectedDisagreement - observedDisagreement, expectedDisagreement);
 }
 
 /** 2m·Σ(x − mean)² over m ratings, taken from the first value in use so that equal values are exactly 0 apart. */

@@ -151,6 +151,16 @@ describe("gwetAC at the edges", () => {
     });
   });
 
+  it("has no spread, to the last digit, when the subjects are alike, and no last digit where it is 0", () => {
+    for (const weights of ["none", "linear", "quadratic"] as const) {
+      const alike = Array.from({ length: 7 }, () => [1, 1, 1, 1, 2, 3, 3]);
+      expect(gwetAC(alike, { weights })).toMatchObject({ coefficient: { standardError: 0 } });
+    }
+    // In exact fractions, observed and expected are both 10/21.
+    const alike = Array.from({ length: 6 }, () => [1, 1, 1, 1, 2, 3, 3]);
+    expect(gwetAC(alike, { weights: "linear" })).toMatchObject({ coefficient: { estimate: 0, low: 0, high: 0 } });
+  });
+
   it("says why it has no coefficient", () => {
     expect(gwetAC([["a", "a"]])).toEqual({ ok: false, n: 1, reason: "one category only" });
     expect(gwetAC(ratings("1 . | . 2 | . ."))).toEqual({ ok: false, n: 2, reason: "no subject was rated twice" });
