@@ -47,6 +47,10 @@ export function intraclassCorrelation(
   const average = (ratio: number) => 1 - 1 / ratio;
   const spearmanBrown = (r: number) => (r > -1 / (k - 1) ? (k * r) / (1 + (k - 1) * r) : Number.NaN);
   const { rows: msr, columns: msc, residual: mse, within: msw } = squares;
+  // Below this a denominator is what rounding leaves of 0.
+  const least = 1e-12 * (msr + msc + mse + msw);
+  const coefficient = (numerator: number, denominator: number, test: Test, range: number[]) =>
+    denominator > least ? coefficientOf(numerator / denominator, test, range) : undefined;
   const coefficients = {
     icc11: coefficient(msr - msw, msr + (k - 1) * msw, oneWay, oneWayRange.map(single)),
     icc21: coefficient(msr - mse, msr + (k - 1) * mse + (k * (msc - mse)) / n, twoWay, sampleRange),
@@ -67,15 +71,8 @@ function testOf(numerator: number, denominator: number, df1: number, df2: number
   return { f, df1, df2, p: fTails(f, df1, df2).upper };
 }
 
-function coefficient(numerator: number, denominator: number, test: Test, range: number[]): Coefficient | undefined {
-  if (!(denominator > 0)) return undefined;
-  const [low = Number.NaN, high = Number.NaN] = range;
-  return {
-    estimate: numerator / denominator,
-    ...(Number.isFinite(low) && { low }),
-    ...(Number.isFinite(high) && { high }),
-    ...test,
-  };
+function coefficientOf(estimate: number, test: Test, [low = Number.NaN, high = Number.NaN]: number[]): Coefficient {
+  return { estimate, ...(Number.isFinite(low) && { low }), ...(Number.isFinite(high) && { high }), ...test };
 }
 
 /** Interval of the ratio of expected mean squares that F estimates. */

@@ -120,6 +120,19 @@ describe("intraclassCorrelation", () => {
     expect(result.icc11).toMatchObject({ estimate: -1, f: 0, p: 1 });
   });
 
+  it("leaves out a coefficient whose denominator is 0 but for rounding", () => {
+    // Mean squares 16, 4 and 36 = 2·16 + 4, so that the denominator of icc2k is 0; in tenths and thirds it rounds to it.
+    const square = [
+      [6, -2],
+      [-4, 0],
+    ];
+    for (const scale of [1, 1 / 3, 0.1, 0.7, 1 / 7]) {
+      const { icc2k, icc21 } = expectOk(intraclassCorrelation(square.map((row) => row.map((value) => value * scale))));
+      expect(icc2k).toBeUndefined();
+      expect(icc21).toMatchObject({ estimate: near(-1) });
+    }
+  });
+
   it("does not clip what is negative", () => {
     const { icc11, icc1k, icc31 } = expectOk(
       intraclassCorrelation([
@@ -167,6 +180,12 @@ describe("intraclassCorrelation", () => {
     expect(intraclassCorrelation([[1], [2], [3]])).toEqual({ ok: false, n: 3, reason: "fewer than two raters" });
     const same = edges.data.cases.find(({ id }) => id === "iccNoVariance")?.ratings ?? [];
     expect(intraclassCorrelation(same)).toEqual({ ok: false, n: 3, reason: "all readings are the same" });
+    // The same but for rounding.
+    const rounded = [
+      [0.3, 0.1 + 0.2],
+      [0.1 + 0.2, 0.3],
+    ];
+    expect(intraclassCorrelation(rounded)).toEqual({ ok: false, n: 2, reason: "all readings are the same" });
   });
 
   it("throws on bad numbers and a confidence that is no share", () => {
