@@ -85,8 +85,8 @@ describe("limitsWithReplicates with a varying true value", () => {
     expect(expected.totalSd).toBeCloseTo(cardiac.published.pairedSd, 2);
   });
 
-  it("gives the exact standard error of the bias when cases have equally many pairs", () => {
-    // Differences 1, 3 | 2, 6 | 9, 9: mean square between cases 52/2, over 6 differences.
+  it("gives the standard errors of the two mean squares when cases have equally many pairs", () => {
+    // Differences 1, 3 | 2, 6 | 9, 9: mean squares 52/2 between cases and 10/3 within.
     const zeros = [
       [0, 0],
       [0, 0],
@@ -99,7 +99,9 @@ describe("limitsWithReplicates with a varying true value", () => {
     ];
     expect(limitsWithReplicates(rows, zeros, { trueValue: "varying" })).toMatchObject({
       bias: { estimate: 5, standardError: near(Math.sqrt(26 / 6)) },
-      sd: near(Math.sqrt((26 - 10 / 3) / 2 + 10 / 3)),
+      sd: near(Math.sqrt(44 / 3)),
+      // Variance of the variance: 2(26/2)²/2 + 2((10/3)/2)²/3.
+      lower: { standardError: near(Math.sqrt(26 / 6 + (1.96 ** 2 * (169 + 50 / 27)) / (4 * (44 / 3)))) },
     });
   });
 

@@ -38,6 +38,14 @@ describe("theilSen", () => {
     });
   });
 
+  it("counts ties in x as no evidence", () => {
+    // Two groups of six: variance (12·11·29 − 2·6·5·17)/18 = 156, 1.96·√156 = 24.5 of the 36 slopes 70, 71, …, 105, so
+    // ranks 5 and 32. Without the ties it would be 212.7, and ranks 3 and 34.
+    const x = [0, 0, 0, 0, 0, 0, 1, 1, 1, 1, 1, 1];
+    const y = [0, 6, 12, 18, 24, 30, 100, 101, 102, 103, 104, 105];
+    expect(expectOk(theilSen(x, y)).slope).toEqual({ estimate: 87.5, low: 74, high: 101 });
+  });
+
   it("leaves the interval out when there are too few points", () => {
     expect(expectOk(theilSen([1, 3], [2, 8])).slope).toEqual({ estimate: 3 });
     expect(expectOk(theilSen([1, 2, 3], [1, 2, 4])).slope).toEqual({ estimate: 1.5 });
