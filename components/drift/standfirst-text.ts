@@ -9,6 +9,7 @@ export function latestState({ points }: DriftChart): DriftPoint["state"] {
 
 const MEASURE_WORDS: Record<DriftMeasure, string> = {
   kappa: "direction kappa",
+  size: "the size of deviations",
   horizontal: "horizontal bias",
   vertical: "vertical bias",
 };

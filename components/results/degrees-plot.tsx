@@ -3,14 +3,21 @@
 import { BlandAltmanPlot } from "@/components/charts/bland-altman-plot";
 import { BlandAltmanTable } from "@/components/charts/bland-altman-table";
 import { Figure } from "@/components/ui/figure";
+import type { DegreesMeasure } from "@/lib/results/degrees-figures";
 import { type ExaminerFigures, READINGS_FEW } from "@/lib/results/schema";
 import { leftOutLabels } from "./standfirst-text";
+
+const MEASURE_WORDS: Record<DegreesMeasure, string> = {
+  horizontal: "horizontal (eso positive, aligned 0)",
+  vertical: "vertical (right over left positive, none 0)",
+  size: "size of the larger part, where the direction agrees",
+};
 
 type DegreesPlotProps = {
   label: string;
   /** Whose readings: a name, "everybody" or "you". */
   whose: string;
-  component: "horizontal" | "vertical";
+  component: DegreesMeasure;
   figures: ExaminerFigures[];
   limits: ExaminerFigures["horizontal"]["limits"];
 };
@@ -49,11 +56,10 @@ export function DegreesPlot({ label, whose, component, figures, limits }: Degree
     yLabel: "reading minus reference, degrees",
     ...(limits.ok ? { bias: limits.bias, lower: limits.lower, upper: limits.upper } : { reason: limits.reason }),
   } as const;
-  const sign = component === "horizontal" ? "eso positive" : "right over left positive";
   return (
     <Figure
       label={label}
-      caption={`Degrees, reading against reference, ${component} (${sign}), where the direction agrees: ${whose}, ${limits.n} pairs. Mean and limits of agreement with 95 % bands; the area of a dot counts readings.`}
+      caption={`Degrees, reading against reference, ${MEASURE_WORDS[component]}: ${whose}, ${limits.n} pairs. Mean and limits of agreement with 95 % bands; the area of a dot counts readings.`}
       table={<BlandAltmanTable {...shared} />}
     >
       <BlandAltmanPlot {...shared} isTooFew={limits.n < READINGS_FEW} />

@@ -7,6 +7,7 @@ import { Field } from "@/components/ui/field";
 import { Figure } from "@/components/ui/figure";
 import { Select } from "@/components/ui/select";
 import { Sheet } from "@/components/ui/sheet";
+import { DEGREES_MEASURES, type DegreesMeasure } from "@/lib/results/degrees-figures";
 import type { RoundResults } from "@/lib/results/schema";
 import { DegreesPlot } from "./degrees-plot";
 import { errorRows } from "./error-rows";
@@ -16,7 +17,7 @@ const EVERYBODY = "everybody";
 /** Degrees, confusion and error kinds of one examiner, or of everybody together. */
 export function DetailSection({ results }: { results: RoundResults }) {
   const [chosen, setChosen] = useState(EVERYBODY);
-  const [component, setComponent] = useState<"horizontal" | "vertical">("horizontal");
+  const [component, setComponent] = useState<DegreesMeasure>("size");
   const examiner = results.examiners.find(({ personId }) => personId === chosen);
   const shown = examiner ? [examiner] : results.examiners;
   const confusion = examiner?.figures.confusion ?? results.panel.confusion;
@@ -44,8 +45,9 @@ export function DetailSection({ results }: { results: RoundResults }) {
             <Select
               {...wiring}
               value={component}
-              onChange={(event) => setComponent(event.target.value === "vertical" ? "vertical" : "horizontal")}
+              onChange={(event) => setComponent(DEGREES_MEASURES.find((each) => each === event.target.value) ?? "size")}
               options={[
+                { value: "size", label: "Size, where the direction agrees" },
                 { value: "horizontal", label: "Horizontal (eso +)" },
                 { value: "vertical", label: "Vertical (right over left +)" },
               ]}

@@ -15,6 +15,8 @@ const COLUMNS: TableColumn[] = [
   { key: "limitsHorizontal", head: "Limits, horizontal", isNumeric: true },
   { key: "biasVertical", head: "Bias, vertical", isNumeric: true, isSortable: true },
   { key: "limitsVertical", head: "Limits, vertical", isNumeric: true },
+  { key: "biasSize", head: "Bias, size", isNumeric: true, isSortable: true },
+  { key: "limitsSize", head: "Limits, size", isNumeric: true },
 ];
 
 /** Every examiner's figures with their intervals, and what each rests on. */
@@ -22,10 +24,10 @@ export function ExaminerTable({ results }: { results: RoundResults }) {
   return (
     <DataTable
       label="Table 1"
-      caption="Figures by examiner against the reference; 95 % intervals below each. Degrees: eso and right over left count positive. Fewer than 20 readings: too few to say."
+      caption="Figures by examiner against the reference; 95 % intervals below each. Degrees: eso and right over left count positive, aligned 0; size where the direction agrees. Fewer than 20 readings: too few to say."
       columns={COLUMNS}
       isWide
-      className="min-w-[78rem]"
+      className="min-w-[92rem]"
       rows={results.examiners.map(({ personId, name, assignedAs, figures }) => ({
         id: personId,
         sortValues: { name, ...sortValues(figures) },
@@ -45,6 +47,8 @@ export function ExaminerTable({ results }: { results: RoundResults }) {
           limitsHorizontal: <LimitsText limits={figures.horizontal.limits} />,
           biasVertical: <BiasText limits={figures.vertical.limits} />,
           limitsVertical: <LimitsText limits={figures.vertical.limits} />,
+          biasSize: <BiasText limits={figures.size.limits} />,
+          limitsSize: <LimitsText limits={figures.size.limits} />,
         },
       }))}
     />
@@ -64,5 +68,6 @@ function sortValues({ readCount, ...figures }: ExaminerFigures) {
     tolerance: shareOf(figures.withinTolerance),
     biasHorizontal: biasOf(figures.horizontal),
     biasVertical: biasOf(figures.vertical),
+    biasSize: biasOf(figures.size),
   };
 }

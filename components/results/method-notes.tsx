@@ -12,8 +12,8 @@ export function MethodNotes({ results }: { results: RoundResults }) {
         Convention of the degrees: {results.round.convention}. Direction kappa compares eye, horizontal and vertical
         direction as one label, “not readable” among them; a purely vertical deviation may be named on either eye. Its
         interval is asymptotic (Fleiss, Cohen and Everitt 1969). Steps are 0, 15, 30, 45 and beyond 45 degrees. Limits
-        of agreement follow Bland and Altman 1999 on pairs that are both readable, of one direction and not beyond the
-        limbus. Shares have Wilson intervals. Each case counts once; hidden repeats are left out.
+        of agreement follow Bland and Altman 1999 on pairs that are both readable and not beyond the limbus. Shares have
+        Wilson intervals. Each case counts once; hidden repeats are left out.
       </p>
       <p className="mt-2">
         Everybody together:{" "}

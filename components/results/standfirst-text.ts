@@ -33,10 +33,10 @@ export function resultsStandfirst(results: RoundResults): string {
     );
     sentences.push(belowFloor(kappas, results.kappaFloor));
   }
-  const { horizontal } = results.panel;
-  if (horizontal.ok) {
+  const { size } = results.panel;
+  if (size.ok) {
     sentences.push(
-      `Horizontally the readings lie ${formatSigned(horizontal.bias.estimate)}° from the reference on average, and 95 % of the differences between ${formatSigned(horizontal.lower.estimate)}° and ${formatSigned(horizontal.upper.estimate)}°.`,
+      `Where the direction agrees, sizes are read ${formatSigned(size.bias.estimate)}° from the reference on average, and 95 % of the differences lie between ${formatSigned(size.lower.estimate)}° and ${formatSigned(size.upper.estimate)}°.`,
     );
   }
   return sentences.join(" ");
@@ -55,6 +55,6 @@ export function leftOutLabels(leftOut: ExaminerFigures["horizontal"]["leftOut"])
     { label: "not read", count: leftOut.unread },
     { label: "not readable", count: leftOut.notReadable },
     { label: "beyond the limbus", count: leftOut.beyondLimbus },
-    { label: "other direction", count: leftOut.otherDirection },
+    { label: "aligned or other direction", count: leftOut.otherDirection },
   ].filter(({ count }) => count > 0);
 }

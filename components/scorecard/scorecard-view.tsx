@@ -29,16 +29,17 @@ export function ScorecardView({ scorecard }: { scorecard: Scorecard }) {
         <ScoreHead scorecard={scorecard} />
       </div>
       <ScoredCases cases={scorecard.cases} />
+      <DegreesPlot label="Fig. 1" whose="you" component="size" figures={[figures]} limits={figures.size.limits} />
       <div className="grid items-start gap-11 lg:grid-cols-2">
         <DegreesPlot
-          label="Fig. 1"
+          label="Fig. 2"
           whose="you"
           component="horizontal"
           figures={[figures]}
           limits={figures.horizontal.limits}
         />
         <DegreesPlot
-          label="Fig. 2"
+          label="Fig. 3"
           whose="you"
           component="vertical"
           figures={[figures]}

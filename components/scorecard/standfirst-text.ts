@@ -8,10 +8,10 @@ const NUMBERS = ["no", "one", "two", "three", "four", "five", "six", "seven", "e
 export function scorecardStandfirst({ figures }: Scorecard): string {
   const agreed = figures.confusion.counts.reduce((sum, row, index) => sum + (row[index] ?? 0), 0);
   const sentences = [`Your direction agrees with the reference on ${agreed} of ${figures.readCount} cases.`];
-  const { limits } = figures.horizontal;
+  const { limits } = figures.size;
   if (limits.ok) {
     sentences.push(
-      `Horizontally your degrees lie ${formatSigned(limits.bias.estimate)}° from the reference on average.`,
+      `Where it agrees, you read sizes ${formatSigned(limits.bias.estimate)}° from the reference on average.`,
     );
   }
   const frequent = ERROR_KINDS.filter((kind) => (figures.errorCounts[kind] ?? 0) > 0)

@@ -53,10 +53,10 @@ export function demoRounds(now: Date): DemoRound[] {
 
 export type LibraryCase = { id: string; isAnchor: boolean };
 
-const DRAWN_COUNT = 18;
+const DRAWN_COUNT = 22;
 
 /**
- * Cases of one round: every anchor, others in a seeded order of which each round takes the next eighteen, two hidden
+ * Cases of one round: every anchor, others in a seeded order of which each round takes the next ones, two hidden
  * repeats and a mirrored one.
  */
 export function chooseItems(library: readonly LibraryCase[], round: number): RoundDraft["items"] {

@@ -41,6 +41,7 @@ function examinerRow(own: ExaminerRound[], rounds: ReleasedRound[], centre: numb
       figuresOf(({ figures }, id) => kappaFigure(id, figures.kappa)),
       centre,
     ),
+    size: biasChart(figuresOf(({ figures }, id) => biasFigure(id, figures.size))),
     horizontal: biasChart(figuresOf(({ figures }, id) => biasFigure(id, figures.horizontal))),
     vertical: biasChart(figuresOf(({ figures }, id) => biasFigure(id, figures.vertical))),
   };
@@ -51,6 +52,7 @@ function panelRow(rounds: ReleasedRound[]): DriftRow {
   const kappas = rounds.map(({ id, panel }) => kappaFigure(id, panel.kappa));
   return {
     kappa: kappaChart(kappas, pooledKappa(kappas)),
+    size: biasChart(rounds.map(({ id, panel }) => biasFigure(id, panel.size))),
     horizontal: biasChart(rounds.map(({ id, panel }) => biasFigure(id, panel.horizontal))),
     vertical: biasChart(rounds.map(({ id, panel }) => biasFigure(id, panel.vertical))),
   };

@@ -1,11 +1,7 @@
 import "server-only";
 import type { Knex } from "knex";
-import {
-  type ExaminerFigures,
-  ExaminerFiguresSchema,
-  type PanelFigures,
-  PanelFiguresSchema,
-} from "@/lib/results/schema";
+import type { z } from "zod";
+import { ExaminerFiguresSchema, type PanelFigures, PanelFiguresSchema } from "@/lib/results/schema";
 
 export type ReleasedRound = {
   id: string;
@@ -45,6 +41,7 @@ export async function listReleasedRounds(db: Knex, departmentId: string): Promis
 const ChartFiguresSchema = ExaminerFiguresSchema.pick({ kappa: true }).extend({
   horizontal: ExaminerFiguresSchema.shape.horizontal.shape.limits,
   vertical: ExaminerFiguresSchema.shape.vertical.shape.limits,
+  size: ExaminerFiguresSchema.shape.size.shape.limits,
 });
 
 export type ExaminerRound = {
@@ -52,10 +49,7 @@ export type ExaminerRound = {
   personId: string;
   name: string;
   assignedAs: "examiner" | "trainee";
-  figures: Pick<ExaminerFigures, "kappa"> & {
-    horizontal: ExaminerFigures["horizontal"]["limits"];
-    vertical: ExaminerFigures["vertical"]["limits"];
-  };
+  figures: z.infer<typeof ChartFiguresSchema>;
 };
 
 export async function listExaminerRounds(db: Knex, resultIds: string[]): Promise<ExaminerRound[]> {
@@ -67,7 +61,7 @@ export async function listExaminerRounds(db: Knex, resultIds: string[]): Promise
     .select("examiner_results.result_id", "people.id", "people.name", "assignments.assigned_as")
     .select(
       db.raw(`jsonb_build_object('kappa', figures -> 'kappa', 'horizontal', figures #> '{horizontal,limits}',
-        'vertical', figures #> '{vertical,limits}') AS figures`),
+        'vertical', figures #> '{vertical,limits}', 'size', figures #> '{size,limits}') AS figures`),
     );
   return rows.map((row) => ({
     resultId: row.result_id,

@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { EstimateSchema } from "@/lib/results/schema";
 
-export const DRIFT_MEASURES = ["kappa", "horizontal", "vertical"] as const;
+export const DRIFT_MEASURES = ["kappa", "size", "horizontal", "vertical"] as const;
 export type DriftMeasure = (typeof DRIFT_MEASURES)[number];
 
 /** One round on a control chart. Limits belong to the point, since rounds differ in how many readings they rest on. */
@@ -25,7 +25,7 @@ export type DriftPoint = z.infer<typeof PointSchema>;
 const ChartSchema = z.object({ centre: z.number().optional(), points: z.array(PointSchema) });
 export type DriftChart = z.infer<typeof ChartSchema>;
 
-const RowSchema = z.object({ kappa: ChartSchema, horizontal: ChartSchema, vertical: ChartSchema });
+const RowSchema = z.object({ kappa: ChartSchema, size: ChartSchema, horizontal: ChartSchema, vertical: ChartSchema });
 export type DriftRow = z.infer<typeof RowSchema>;
 
 export const DriftBoardSchema = z.object({

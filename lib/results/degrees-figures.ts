@@ -1,4 +1,4 @@
-import { BEYOND_LIMBUS, type Degrees, type Finding } from "@/lib/reflex/finding";
+import { BEYOND_LIMBUS, type Degrees, type ReadableFinding } from "@/lib/reflex/finding";
 import { findingParts } from "@/lib/reflex/finding-parts";
 import { signedComponents } from "@/lib/reflex/signed-components";
 import { limitsOfAgreement } from "@/lib/statistics";
@@ -9,18 +9,13 @@ type Pair = { reading: number; reference: number };
 /** A pair of degrees, or why there is none. */
 type Compared = Pair | keyof LeftOut;
 
-/** Bias and limits of the horizontal component (degrees, eso +), and the pair behind each item. */
-export function horizontalFigures(items: readonly ShownItem[]) {
-  return componentFigures(items, "horizontal");
-}
+/** What is compared in degrees: the signed components, or the size alone. */
+export const DEGREES_MEASURES = ["horizontal", "vertical", "size"] as const;
+export type DegreesMeasure = (typeof DEGREES_MEASURES)[number];
 
-/** Bias and limits of the vertical component (degrees, right over left +), and the pair behind each item. */
-export function verticalFigures(items: readonly ShownItem[]) {
-  return componentFigures(items, "vertical");
-}
-
-function componentFigures(items: readonly ShownItem[], component: "horizontal" | "vertical") {
-  const compared = items.map((item) => compareComponent(item, component));
+/** Bias and limits of agreement of one measure, reading minus reference, and the pair behind each item. */
+export function degreesFigures(items: readonly ShownItem[], measure: DegreesMeasure) {
+  const compared = items.map((item) => compareDegrees(item, measure));
   return {
     figures: figuresOf(compared),
     pairs: compared.map((pair) => (typeof pair === "string" ? null : pair)),
@@ -28,29 +23,23 @@ function componentFigures(items: readonly ShownItem[], component: "horizontal" |
 }
 
 /**
- * Bias and limits of the size alone (degrees, without direction) of the larger part of the reference, where its
- * direction was read right. Aligned pairs have no size and are left out.
+ * The two numbers of degrees to compare, or why there are none.
+ *
+ * Signed components (eso +, right over left +, aligned 0) are compared wherever both are readable and not beyond the
+ * limbus, so that they hold misses and reversals as well. The size of the larger part of the reference is compared
+ * where its direction was read right: there one reversal does not outweigh every honest estimate.
  */
-export function sizeFigures(items: readonly ShownItem[]): DegreesFigures {
-  return figuresOf(items.map(compareSize));
-}
-
-/**
- * The two signed components, compared where both are readable, not beyond the limbus and of one direction (none counts
- * as one). A reversed or missed direction is a blunder to be counted: one of them would outweigh every honest estimate.
- */
-export function compareComponent({ reading, reference }: ShownItem, component: "horizontal" | "vertical"): Compared {
+export function compareDegrees(item: ShownItem, measure: DegreesMeasure): Compared {
+  const { reading, reference } = item;
   if (!reading) return "unread";
   if (!reading.readable || !reference.readable) return "notReadable";
-  const read = signedComponents(reading)[component];
-  const assigned = signedComponents(reference)[component];
-  if (read === null || assigned === null) return "beyondLimbus";
-  return Math.sign(read) === Math.sign(assigned) ? { reading: read, reference: assigned } : "otherDirection";
+  if (measure === "size") return compareSize(reading, reference);
+  const read = signedComponents(reading)[measure];
+  const assigned = signedComponents(reference)[measure];
+  return read === null || assigned === null ? "beyondLimbus" : { reading: read, reference: assigned };
 }
 
-function compareSize({ reading, reference }: ShownItem): Compared {
-  if (!reading) return "unread";
-  if (!reading.readable || !reference.readable) return "notReadable";
+function compareSize(reading: ReadableFinding, reference: ReadableFinding): Compared {
   const component = largerPart(reference);
   if (!component) return "otherDirection";
   const read = findingParts(reading);
@@ -66,8 +55,7 @@ function compareSize({ reading, reference }: ShownItem): Compared {
   return { reading: readDegrees, reference: assignedDegrees };
 }
 
-function largerPart(finding: Finding): "horizontal" | "vertical" | null {
-  if (!finding.readable) return null;
+function largerPart(finding: ReadableFinding): "horizontal" | "vertical" | null {
   const { horizontal, vertical } = findingParts(finding);
   if (!horizontal && !vertical) return null;
   return order(vertical?.degrees) > order(horizontal?.degrees) ? "vertical" : "horizontal";

@@ -4,7 +4,7 @@ import type { Finding } from "@/lib/reflex/finding";
 import { nameVerticalOnEye } from "@/lib/reflex/name-vertical-on-eye";
 import { STEPS, stepOfFinding } from "@/lib/reflex/step";
 import { cohenKappa, crossTable, wilsonInterval } from "@/lib/statistics";
-import { horizontalFigures, sizeFigures, verticalFigures } from "./degrees-figures";
+import { degreesFigures } from "./degrees-figures";
 import type { ExaminerFigures } from "./schema";
 
 /** One showing in the eyes of one examiner: what was read (null: nothing) and the reference as shown, mirrored or not. */
@@ -32,8 +32,9 @@ export function examinerFigures(shown: readonly ShownItem[]): ExaminerFigures {
   );
   const agreed = pairs.filter(({ reading, reference }) => sameLabel(reading, reference)).length;
   const correct = items.filter(({ reading }, index) => reading && errors[index] === null).length;
-  const horizontal = horizontalFigures(items);
-  const vertical = verticalFigures(items);
+  const horizontal = degreesFigures(items, "horizontal");
+  const vertical = degreesFigures(items, "vertical");
+  const size = degreesFigures(items, "size");
   return {
     caseCount: items.length,
     readCount: pairs.length,
@@ -44,7 +45,7 @@ export function examinerFigures(shown: readonly ShownItem[]): ExaminerFigures {
     stepsQuadratic: stepsKappa(items, "quadratic"),
     horizontal: horizontal.figures,
     vertical: vertical.figures,
-    size: sizeFigures(items),
+    size: size.figures,
     withinTolerance: shareOf(correct, pairs.length),
     confusion: labels.ok ? usedCategories(labels.counts) : { categories: [], counts: [] },
     errorCounts: Object.fromEntries(
@@ -56,6 +57,7 @@ export function examinerFigures(shown: readonly ShownItem[]): ExaminerFigures {
       error: errors[index] ?? null,
       horizontal: horizontal.pairs[index] ?? null,
       vertical: vertical.pairs[index] ?? null,
+      size: size.pairs[index] ?? null,
     })),
   };
 }

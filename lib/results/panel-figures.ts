@@ -1,6 +1,6 @@
 import { DIRECTION_LABELS, directionLabel } from "@/lib/reflex/direction-label";
 import { bootstrapInterval, cohenKappa, type Estimate, fleissKappa, type Result } from "@/lib/statistics";
-import { compareComponent } from "./degrees-figures";
+import { compareDegrees, DEGREES_MEASURES } from "./degrees-figures";
 import { onReferenceEye, type ShownItem, usedCategories } from "./examiner-figures";
 import type { PanelFigures } from "./schema";
 
@@ -8,7 +8,13 @@ const RESAMPLES = 1000;
 const SEED = 1;
 
 /** What everybody made of one item. */
-type PanelCase = { labels: number[]; referenceLabel: number; horizontal: number[]; vertical: number[] };
+type PanelCase = {
+  labels: number[];
+  referenceLabel: number;
+  horizontal: number[];
+  vertical: number[];
+  size: number[];
+};
 
 /**
  * The panel as a whole: kappa, bias and limits of all readings together against the reference, and Fleiss' kappa among
@@ -27,6 +33,7 @@ export function panelFigures(examiners: readonly (readonly ShownItem[])[]): Pane
     kappa: pooledKappa(cases, table),
     horizontal: pooledLimits(cases.map(({ horizontal }) => horizontal)),
     vertical: pooledLimits(cases.map(({ vertical }) => vertical)),
+    size: pooledLimits(cases.map(({ size }) => size)),
     amongExaminers: amongExaminers(cases),
     confusion: usedCategories(table),
   };
@@ -42,14 +49,15 @@ function panelCases(examiners: readonly (readonly ShownItem[])[]): PanelCase[] {
       referenceLabel: DIRECTION_LABELS.indexOf(directionLabel(item.reference)),
       horizontal: [],
       vertical: [],
+      size: [],
     };
     if (!known) cases.set(item.itemId, entry);
     if (!item.reading) continue;
     const label = DIRECTION_LABELS.indexOf(directionLabel(onReferenceEye(item.reading, item.reference)));
     entry.labels[label] = (entry.labels[label] ?? 0) + 1;
-    for (const component of ["horizontal", "vertical"] as const) {
-      const compared = compareComponent(item, component);
-      if (typeof compared !== "string") entry[component].push(compared.reading - compared.reference);
+    for (const measure of DEGREES_MEASURES) {
+      const compared = compareDegrees(item, measure);
+      if (typeof compared !== "string") entry[measure].push(compared.reading - compared.reference);
     }
   }
   return [...cases.values()];

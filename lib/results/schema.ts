@@ -35,7 +35,7 @@ export const LeftOutSchema = z.object({
   unread: z.number(),
   notReadable: z.number(),
   beyondLimbus: z.number(),
-  /** The direction differs; for sizes also where neither has one. */
+  /** Of sizes only: the direction differs, or the reference is aligned and has no size. */
   otherDirection: z.number(),
 });
 
@@ -67,6 +67,7 @@ export const ExaminerFiguresSchema = z.object({
       error: z.string().nullable(),
       horizontal: PairSchema.nullable(),
       vertical: PairSchema.nullable(),
+      size: PairSchema.nullable(),
     }),
   ),
 });
@@ -81,6 +82,7 @@ export const PanelFiguresSchema = z.object({
   kappa: statistic({ kappa: EstimateSchema }),
   horizontal: LimitsSchema,
   vertical: LimitsSchema,
+  size: LimitsSchema,
   amongExaminers: statistic({ kappa: EstimateSchema }),
   confusion: z.object({ categories: z.array(z.string()), counts: z.array(z.array(z.number())) }),
 });
