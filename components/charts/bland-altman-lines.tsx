@@ -17,10 +17,12 @@ export function AgreementLines({ agreement, scale, isTooFew }: LinesProps) {
   const across = `H${scale.right}`;
   return (
     <g pointerEvents="none">
-      {[upper, lower, bias].map(({ low, high, estimate }) =>
-        low === undefined || high === undefined ? null : (
+      {(["upper", "lower", "bias"] as const).map((line) => {
+        const { low, high } = agreement[line];
+        if (low === undefined || high === undefined) return null;
+        return (
           <rect
-            key={estimate}
+            key={line}
             x={scale.left}
             y={scale.y(high)}
             width={scale.right - scale.left}
@@ -28,8 +30,8 @@ export function AgreementLines({ agreement, scale, isTooFew }: LinesProps) {
             fill={colour}
             fillOpacity={0.1}
           />
-        ),
-      )}
+        );
+      })}
       <path d={`M${scale.left} ${scale.y(bias.estimate)}${across}`} stroke={colour} strokeWidth={2} />
       <path
         d={`M${scale.left} ${scale.y(upper.estimate)}${across}M${scale.left} ${scale.y(lower.estimate)}${across}`}

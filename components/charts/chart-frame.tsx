@@ -29,7 +29,7 @@ export function ChartFrame({ heightPx, tips = [], pointsName = "points", active 
   const { ref, box } = useChartBox();
   const spoken = tips[active ?? 0];
   return (
-    <div className={joinClasses("relative min-w-0", styles.chart)}>
+    <div className={joinClasses("@container relative min-w-0", styles.chart)}>
       <div ref={ref} className={styles.drawing} style={{ minHeight: heightPx }} onPointerLeave={() => onActive?.(null)}>
         {box && children(box)}
       </div>

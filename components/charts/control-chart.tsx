@@ -63,7 +63,7 @@ export function ControlChart({
       below={isSmall ? null : <ControlKey />}
     >
       {(box) => {
-        const hasWords = box.width >= 560;
+        const hasWords = box.width >= 480;
         const wide = {
           top: 30,
           right: hasWords ? 128 : 62,
@@ -106,7 +106,9 @@ export function ControlChart({
             />
             <PlotLayer level="text">
               {(scale) =>
-                isSmall ? null : <HoverColumns xs={times.map(scale.x)} scale={scale} onActive={setActive} />
+                isSmall ? null : (
+                  <HoverColumns points={points} xs={times.map(scale.x)} scale={scale} onActive={setActive} />
+                )
               }
             </PlotLayer>
             <PlotLayer level="tip">

@@ -1,3 +1,4 @@
+import type { ReactNode } from "react";
 import type { ControlState } from "./control-point";
 import { Diamond, Dot, OpenDot, Triangle } from "./marks";
 
@@ -39,17 +40,9 @@ export function ControlKey() {
   );
 }
 
-function KeyItem({
-  text,
-  isNarrowOnly,
-  children,
-}: {
-  text: string;
-  isNarrowOnly?: boolean;
-  children: React.ReactNode;
-}) {
+function KeyItem({ text, isNarrowOnly, children }: { text: string; isNarrowOnly?: boolean; children: ReactNode }) {
   return (
-    <li className={isNarrowOnly ? "flex items-center gap-2 sm:hidden" : "flex items-center gap-2"}>
+    <li className={isNarrowOnly ? "flex items-center gap-2 @[480px]:hidden" : "flex items-center gap-2"}>
       <svg width={SIGN_PX} height={SIGN_PX} aria-hidden="true">
         {children}
       </svg>

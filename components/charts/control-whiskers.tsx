@@ -26,21 +26,27 @@ export function ControlWhiskers({
   );
 }
 
+type HoverColumnsProps = Columns & { points: readonly ControlPoint[]; onActive: (index: number) => void };
+
 /** The pointer finds a round anywhere in its column, so that nobody has to hit a dot. */
-export function HoverColumns({ xs, scale, onActive }: Columns & { onActive: (index: number) => void }) {
+export function HoverColumns({ points, xs, scale, onActive }: HoverColumnsProps) {
+  const columns = columnBounds(xs, scale.left, scale.right);
   return (
     <g>
-      {columnBounds(xs, scale.left, scale.right).map(({ from, to }, i) => (
-        <rect
-          key={from}
-          x={from}
-          y={scale.top}
-          width={Math.max(0, to - from)}
-          height={scale.bottom - scale.top + 34}
-          fill="transparent"
-          onPointerEnter={() => onActive(i)}
-        />
-      ))}
+      {points.map(({ id }, i) => {
+        const { from, to } = columns[i] ?? { from: 0, to: 0 };
+        return (
+          <rect
+            key={id}
+            x={from}
+            y={scale.top}
+            width={Math.max(0, to - from)}
+            height={scale.bottom - scale.top + 34}
+            fill="transparent"
+            onPointerEnter={() => onActive(i)}
+          />
+        );
+      })}
     </g>
   );
 }

@@ -13,7 +13,7 @@ export function KappaRowText({ row, top, layout, box, floor }: RowProps) {
   const { figure, interval } = kappaText(row);
   const isStrong = row.isOwn || isUnderFloor(row, floor);
   const you = row.isOwn && row.label.toLowerCase() !== "you" ? " you" : "";
-  const nameMax = layout.nameMax - box.measure(you, KAPPA_PX.note);
+  const nameMax = layout.nameMax(row) - box.measure(you, KAPPA_PX.note);
   const name = fitText(row.label, nameMax, (text) => box.measure(text, KAPPA_PX.name, "sans", isStrong ? 600 : 400));
   const isRefused = row.estimate === undefined;
   const baseline = top + layout.nameAt;
