@@ -97,23 +97,16 @@ function alphaOf({ observedDisagreement, expectedDisagreement }: Disagreements):
   return beyondChance(expectedDisagreement - observedDisagreement, expectedDisagreement);
 }
 
-/** 2m·Σ(x − mean)² over m ratings, taken from the first value in use so that equal values are exactly 0 apart. */
+/** 2m·Σ(x − mean)² over m ratings: the squared differences of all their ordered pairs. */
 function squaredDistances(counts: readonly number[], values: readonly number[]): number {
-  const origin = values[counts.findIndex((count) => count > 0)] ?? 0;
-  let size = 0;
-  let total = 0;
-  for (let category = 0; category < counts.length; category += 1) {
-    const count = counts[category] ?? 0;
-    size += count;
-    total += count * ((values[category] ?? 0) - origin);
-  }
-  const mean = total / size;
+  const size = sum(counts);
+  const mean = dot(counts, values) / size;
   let squares = 0;
   let squaredNumbers = 0;
   for (let category = 0; category < counts.length; category += 1) {
     const count = counts[category] ?? 0;
     const value = values[category] ?? 0;
-    squares += count * (value - origin - mean) ** 2;
+    squares += count * (value - mean) ** 2;
     squaredNumbers += count * value ** 2;
   }
   return 2 * size * withoutCancellation(squares, squaredNumbers);
