@@ -17,7 +17,12 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: "unit", include: ["tests/unit/**/*.test.{ts,tsx}"], sequence: { groupOrder: 1 } },
+        test: {
+          name: "unit",
+          include: ["tests/unit/**/*.test.{ts,tsx}"],
+          testTimeout: 30_000, // of a busy machine; each is quick by itself
+          sequence: { groupOrder: 1 },
+        },
       },
       {
         extends: true,

@@ -1,5 +1,5 @@
 import { spawnSync } from "node:child_process";
-import { chownSync, mkdirSync, mkdtempSync } from "node:fs";
+import { chownSync, existsSync, mkdirSync, mkdtempSync, readdirSync, rmdirSync, rmSync } from "node:fs";
 import path from "node:path";
 import type { RunAs } from "./tied-process";
 
@@ -20,11 +20,28 @@ export function makeReachable(folder: string, runAs: RunAs | undefined): boolean
   return spawnSync("test", ["-w", folder, "-a", "-x", folder], { cwd: "/", ...runAs }).status === 0;
 }
 
-/** A new folder for the time of a test run, outside the checkout, that PostgreSQL's user can get to. */
+const TEST_FOLDER = "evenglint-test-";
+
+/**
+ * A new folder for the time of a test run, outside the checkout, that PostgreSQL's user can get to. Folders of runs that
+ * were killed are removed on the way.
+ */
 export function makeTemporaryFolder(runAs: RunAs | undefined, places: string[]): string {
   for (const place of places) {
-    const folder = mkdtempSync(path.join(place, "evenglint-test-"));
+    removeAbandoned(place);
+    const folder = mkdtempSync(path.join(place, `${TEST_FOLDER}${process.pid}-`));
     if (makeReachable(folder, runAs)) return folder;
+    rmdirSync(folder);
   }
   throw new Error(`PostgreSQL's user can reach none of ${places.join(", ")}.`);
+}
+
+function removeAbandoned(place: string): void {
+  for (const name of readdirSync(place)) {
+    const pid = name.startsWith(TEST_FOLDER) && Number.parseInt(name.slice(TEST_FOLDER.length), 10);
+    if (!pid || existsSync(`/proc/${pid}`)) continue;
+    try {
+      rmSync(path.join(place, name), { recursive: true, force: true });
+    } catch {} // another user's, who will remove it
+  }
 }
