@@ -4,7 +4,7 @@ import { appendAudit } from "@/lib/audit/append-audit";
 import type { Actor } from "@/lib/auth/actor";
 import { conflict, notFound } from "@/lib/errors";
 import { enqueue } from "@/lib/jobs/enqueue";
-import { publish } from "./publish";
+import { publish, removePictures } from "./publish";
 import { hasResults, lockRound, lockRoundById, type Round, setRoundState } from "./queries";
 import type { RoundState } from "./schema";
 
@@ -13,7 +13,8 @@ const NEXT: Partial<Record<RoundState, RoundState>> = { draft: "open", open: "cl
 type Options = { now?: Date; random?: () => number };
 
 /**
- * Moves a round one step (draft, open, closed, released), with its audit entry and jobs, or not at all.
+ * Moves a round one step (draft, open, closed, released), with its audit entry and jobs, or not at all: if anything
+ * fails no picture stays behind either.
  * Throws not-found (another department's too), a conflict for any other step, or invalid when a draft is not complete.
  */
 export async function advanceRound(
@@ -23,17 +24,23 @@ export async function advanceRound(
   to: "open" | "closed" | "released",
   { now = new Date(), random = Math.random }: Options = {},
 ): Promise<void> {
-  await db.transaction(async (trx) => {
-    const round = await lockRound(trx, actor.departmentId, roundId);
-    if (!round) throw notFound("round");
-    if (NEXT[round.state] !== to) {
-      throw conflict("round-state", `The round is ${round.state}. It cannot become ${to}.`);
-    }
-    if (to === "open") await publish(trx, round, { now, random });
-    if (to === "closed") await close(trx, round, now);
-    if (to === "released") await release(trx, round, now);
-    await appendAudit(trx, { ...auditOf(round, actor.id, to), at: now });
-  });
+  const pictureKeys: string[] = [];
+  try {
+    await db.transaction(async (trx) => {
+      const round = await lockRound(trx, actor.departmentId, roundId);
+      if (!round) throw notFound("round");
+      if (NEXT[round.state] !== to) {
+        throw conflict("round-state", `The round is ${round.state}. It cannot become ${to}.`);
+      }
+      if (to === "open") await publish(trx, round, { now, random, pictureKeys });
+      if (to === "closed") await close(trx, round, now);
+      if (to === "released") await release(trx, round, now);
+      await appendAudit(trx, { ...auditOf(round, actor.id, to), at: now });
+    });
+  } catch (error) {
+    await removePictures(db, pictureKeys).catch(() => undefined); // the first failure is the one to tell
+    throw error;
+  }
 }
 
 /** For the job queue: closes a round whose time has come. A round closed already is left alone, so it may run again. */

@@ -12,19 +12,26 @@ import {
   insertOrders,
   listAssignments,
   listDraftItems,
+  pictureKeysInUse,
   type Round,
   setItemPicture,
   setRoundState,
   usableCaseIds,
 } from "./queries";
 
-type Chance = { now: Date; random: () => number };
+type Publishing = {
+  now: Date;
+  random: () => number;
+  /** Filled with the key of each picture before it is written: the bucket knows no transaction. */
+  pictureKeys: string[];
+};
 
 /**
  * Publishes a locked draft inside the caller's transaction: every item gets a picture of its own, every examiner an
- * order of their own, and the closing is queued. If anything fails nothing is published and no picture stays behind.
+ * order of their own, and the closing is queued. When the transaction fails, the caller removes the pictures.
  */
-export async function publish(trx: Knex.Transaction, round: Round, { now, random }: Chance): Promise<void> {
+export async function publish(trx: Knex.Transaction, round: Round, publishing: Publishing): Promise<void> {
+  const { now, random, pictureKeys } = publishing;
   const items = await listDraftItems(trx, round.id);
   const assignments = await listAssignments(trx, round.id);
   const faults = [
@@ -34,27 +41,30 @@ export async function publish(trx: Knex.Transaction, round: Round, { now, random
   ];
   if (faults.length > 0) throw invalid("The round cannot be published yet.", faults, "round-incomplete");
 
-  const pictures: ItemPicture[] = [];
-  try {
-    for (const item of items) pictures.push(await writePicture(item, random));
-    for (const picture of pictures) await setItemPicture(trx, picture);
-    const showings = items.map(({ id, caseId }) => ({ id, twin: caseId }));
-    const orders = assignments.map(({ id }) => ({ assignmentId: id, itemIds: drawOrder(showings, random) }));
-    await insertOrders(trx, orders);
-    await setRoundState(trx, round.id, "open", now);
-    if (round.closesAt) {
-      await enqueue(trx, "close-round", { roundId: round.id }, { key: `close:${round.id}`, runAt: round.closesAt });
-    }
-  } catch (error) {
-    await Promise.allSettled(pictures.map(({ key }) => deleteObject(key)));
-    throw error;
+  for (const item of items) await setItemPicture(trx, await writePicture(item, random, pictureKeys));
+  const showings = items.map(({ id, caseId }) => ({ id, twin: caseId }));
+  const orders = assignments.map(({ id }) => ({ assignmentId: id, itemIds: drawOrder(showings, random) }));
+  await insertOrders(trx, orders);
+  await setRoundState(trx, round.id, "open", now);
+  if (round.closesAt) {
+    await enqueue(trx, "close-round", { roundId: round.id }, { key: `close:${round.id}`, runAt: round.closesAt });
   }
 }
 
-async function writePicture(item: DraftItem, random: () => number): Promise<ItemPicture> {
+/**
+ * Removes the pictures of a publishing that failed, as far as the bucket can be reached. One that an item names stays:
+ * the transaction was committed after all, and only the answer to that was lost.
+ */
+export async function removePictures(db: Knex, keys: readonly string[]): Promise<void> {
+  const named = await pictureKeysInUse(db, keys);
+  await Promise.allSettled(keys.filter((key) => !named.has(key)).map((key) => deleteObject(key)));
+}
+
+async function writePicture(item: DraftItem, random: () => number, pictureKeys: string[]): Promise<ItemPicture> {
   const photograph = await getObject(item.storageKey);
   const picture = await makeItemPicture(photograph.body, { isMirrored: item.kind === "mirrored", random });
   const key = `pictures/${crypto.randomUUID()}`;
+  pictureKeys.push(key); // before it is written: it may be kept although the answer is lost
   await putObject(key, picture.body, "image/jpeg");
   return { itemId: item.id, key, width: picture.width, height: picture.height };
 }

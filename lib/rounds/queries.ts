@@ -203,6 +203,12 @@ export async function setItemPicture(trx: Knex.Transaction, { itemId, key, width
   await trx("items").where({ id: itemId }).update({ picture_key: key, picture_width: width, picture_height: height });
 }
 
+/** Of the given keys those that an item names. */
+export async function pictureKeysInUse(db: Knex, keys: readonly string[]): Promise<Set<string>> {
+  const rows = await db("items").whereIn("picture_key", keys).select("picture_key");
+  return new Set(rows.map(({ picture_key }) => picture_key));
+}
+
 export async function listAssignments(db: Knex, roundId: string): Promise<{ id: string; personId: string }[]> {
   const rows = await db("assignments").where({ round_id: roundId }).orderBy("id").select("id", "person_id");
   return rows.map((row) => ({ id: row.id, personId: row.person_id }));
