@@ -1,5 +1,5 @@
 import { sum } from "simple-statistics";
-import { addAt, at, dotProduct, invertPositive, type Matrix, multiply, quadraticForm } from "./matrix";
+import { addAt, at, dotProduct, invertPositive, type Matrix, multiply } from "./matrix";
 import { type Factor, reduceEquations, startOf } from "./reduced-equations";
 
 /** A number and its variance in units of the residual variance. */
@@ -36,21 +36,24 @@ export function fitAdditive(
   addToBlocks(covariance, others, (count) => -1 / count ** 2);
 
   const solution = multiply(covariance, right);
-  const means = levels.map(({ count, mean, mix }) => ({
-    value: mean - dotProduct(mix, solution),
-    variance: 1 / count + quadraticForm(covariance, mix),
-  }));
+  // What the solution's error adds to a level's mean goes with its mix m as mᵀ·covariance·m.
+  const spreads = levels.map(({ mix }) => multiply(covariance, mix));
   const meanMix = right.map((_, i) => sum(levels.map(({ mix }) => at(mix, i))) / first.count);
+  const meanSpread = multiply(covariance, meanMix);
   const ownVariance = sum(levels.map(({ count }) => 1 / count)) / first.count ** 2;
+  const means = levels.map(({ count, mean, mix }, level) => ({
+    value: mean - dotProduct(mix, solution),
+    variance: 1 / count + dotProduct(mix, spreads[level] ?? meanSpread),
+  }));
   const mean = {
     value: sum(means.map(({ value }) => value)) / first.count,
-    variance: ownVariance + quadraticForm(covariance, meanMix),
+    variance: ownVariance + dotProduct(meanMix, meanSpread),
   };
   const effects = levels.map(({ count, mix }, level) => {
-    const apart = mix.map((share, i) => share - at(meanMix, i));
+    const ofMix = dotProduct(mix, spreads[level] ?? meanSpread) - 2 * dotProduct(mix, meanSpread);
     return {
       value: (means[level]?.value ?? 0) - mean.value,
-      variance: (1 - 2 / first.count) / count + ownVariance + quadraticForm(covariance, apart),
+      variance: (1 - 2 / first.count) / count + ofMix + mean.variance,
     };
   });
   const effectAt = (column: number) => ({ value: at(solution, column), variance: at(covariance[column], column) });

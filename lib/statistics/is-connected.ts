@@ -5,26 +5,26 @@
  * Shape: level numbers from 0, index i of both the same entry. No entries hang together.
  */
 export function isConnected(first: readonly number[], second: readonly number[]): boolean {
-  const parents = new Map<number, number>();
+  const parents: number[] = [];
   let parts = 0;
-  const rootOf = (level: number): number => {
-    if (!parents.has(level)) {
-      parents.set(level, level);
+  const rootOf = (place: number): number => {
+    if (parents[place] === undefined) {
+      parents[place] = place;
       parts += 1;
     }
-    let root = level;
-    for (let parent = parents.get(root) ?? root; parent !== root; parent = parents.get(root) ?? root) {
-      const above = parents.get(parent) ?? parent;
-      parents.set(root, above); // halves the way for the next search
+    let root = place;
+    for (let parent = parents[root] ?? root; parent !== root; parent = parents[root] ?? root) {
+      const above = parents[parent] ?? parent;
+      parents[root] = above; // halves the way for the next search
       root = above;
     }
     return root;
   };
   second.forEach((level, index) => {
-    const root = rootOf(first[index] ?? 0);
-    const otherRoot = rootOf(-1 - level); // below 0, so that the two factors never share a number
+    const root = rootOf(2 * (first[index] ?? 0)); // even places for one factor, odd ones for the other
+    const otherRoot = rootOf(2 * level + 1);
     if (root === otherRoot) return;
-    parents.set(root, otherRoot);
+    parents[root] = otherRoot;
     parts -= 1;
   });
   return parts <= 1;

@@ -14,60 +14,52 @@ export function addAt(values: Float64Array | undefined, index: number, amount: n
   if (values) values[index] = at(values, index) + amount;
 }
 
+/** Adds factor·v to `target`, in place. */
+function addMultiple(target: Float64Array, v: Float64Array, factor: number): void {
+  for (let i = 0; i < target.length; i += 1) target[i] = (target[i] ?? 0) + factor * (v[i] ?? 0);
+}
+
 /** Adds weight·v·vᵀ to a matrix, in place. */
 export function addOuter(matrix: Matrix, v: Float64Array, weight: number): void {
   matrix.forEach((row, i) => {
     const factor = weight * at(v, i);
-    if (factor !== 0) for (let j = 0; j < v.length; j += 1) addAt(row, j, factor * at(v, j));
+    if (factor !== 0) addMultiple(row, v, factor);
   });
 }
 
-/** Sum of products over the first `end` places. */
-export function dotProduct(first: Float64Array, second: Float64Array, end = first.length): number {
+export function dotProduct(first: Float64Array, second: Float64Array): number {
   let sum = 0;
-  for (let i = 0; i < end; i += 1) sum += at(first, i) * at(second, i);
+  for (let i = 0; i < first.length; i += 1) sum += (first[i] ?? 0) * (second[i] ?? 0);
   return sum;
 }
 
 export function multiply(matrix: Matrix, v: Float64Array): Float64Array {
-  return Float64Array.from(matrix, (row) => dotProduct(row, v));
-}
-
-/** vᵀ·matrix·v. */
-export function quadraticForm(matrix: Matrix, v: Float64Array): number {
-  return dotProduct(multiply(matrix, v), v);
+  const product = new Float64Array(matrix.length);
+  matrix.forEach((row, i) => {
+    product[i] = dotProduct(row, v);
+  });
+  return product;
 }
 
 /**
- * Inverse of a symmetric positive definite matrix by Cholesky's factors; undefined when it is singular to rounding.
- * Takes time cubic in the size; the input is not changed.
+ * Inverse of a symmetric positive definite matrix; undefined when it is singular to rounding.
+ *
+ * Gauss-Jordan elimination down the diagonal, whose pivots are positive exactly for such a matrix, so that no rows need
+ * to change places. Takes time cubic in the size; the input is not changed.
  */
 export function invertPositive(matrix: Matrix): Matrix | undefined {
-  const factor: Float64Array[] = [];
-  for (const [i, source] of matrix.entries()) {
-    const row = new Float64Array(matrix.length);
-    factor.forEach((above, j) => {
-      row[j] = (at(source, j) - dotProduct(row, above, j)) / at(above, j);
-    });
-    const pivot = at(source, i) - dotProduct(row, row, i);
-    if (!(pivot > 1e-10 * at(source, i))) return undefined;
-    row[i] = Math.sqrt(pivot);
-    factor.push(row);
+  const inverse = matrix.map((row) => Float64Array.from(row));
+  for (const [k, pivotRow] of inverse.entries()) {
+    const pivot = at(pivotRow, k);
+    if (!(pivot > 1e-10 * at(matrix[k], k))) return undefined;
+    pivotRow[k] = 1;
+    for (let j = 0; j < pivotRow.length; j += 1) pivotRow[j] = at(pivotRow, j) / pivot;
+    for (const row of inverse) {
+      if (row === pivotRow) continue;
+      const factor = at(row, k);
+      row[k] = 0;
+      if (factor !== 0) addMultiple(row, pivotRow, -factor);
+    }
   }
-  return matrix.map((_, column) => solveUnit(factor, column));
-}
-
-/** One column of the inverse: forwards through the factor from a unit vector, then backwards. */
-function solveUnit(factor: Matrix, column: number): Float64Array {
-  const solution = new Float64Array(factor.length);
-  factor.forEach((row, i) => {
-    solution[i] = ((i === column ? 1 : 0) - dotProduct(row, solution, i)) / at(row, i);
-  });
-  for (let i = factor.length - 1; i >= 0; i -= 1) {
-    const row = factor[i];
-    const value = at(solution, i) / at(row, i);
-    solution[i] = value;
-    for (let j = 0; j < i; j += 1) addAt(solution, j, -value * at(row, j));
-  }
-  return solution;
+  return inverse;
 }

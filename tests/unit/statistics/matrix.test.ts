@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { invertPositive, multiply, quadraticForm } from "@/lib/statistics/matrix";
+import { invertPositive, multiply } from "@/lib/statistics/matrix";
 import { near } from "./near";
 
 const matrix = (rows: number[][]) => rows.map((row) => Float64Array.from(row));
@@ -65,19 +65,5 @@ describe("invertPositive", () => {
         ]),
       ),
     ).toBeUndefined();
-  });
-});
-
-describe("quadraticForm", () => {
-  it("weighs a vector by a matrix", () => {
-    expect(
-      quadraticForm(
-        matrix([
-          [2, 1],
-          [1, 3],
-        ]),
-        Float64Array.from([1, 2]),
-      ),
-    ).toBe(18);
   });
 });
