@@ -43,6 +43,10 @@ describe("decisionIntervalForRunLength", () => {
     expect(runLength.cusum({ k: 0, h })).toEqual(near(100, 1e-6));
   });
 
+  it("says which run is the shortest that k allows", () => {
+    expect(() => decisionIntervalForRunLength({ k: 1, runLength: 3 })).toThrow("above 3.151");
+  });
+
   it.each([
     ["a negative k", { k: -0.5, runLength: 100 }],
     ["a k that is no number", { k: Number.NaN, runLength: 100 }],
