@@ -131,7 +131,10 @@ export async function listDeskItems(db: Knex, assignmentId: string): Promise<Des
   }));
 }
 
-/** Where the picture of a showing is stored, for the examiner it belongs to once the round has opened. */
+/**
+ * Where the picture of a showing is stored, for the examiner it belongs to once the round has opened. A released round
+ * no longer shows a case that the person also has in a round still sealed, where it could be laid beside it.
+ */
 export async function findOwnPictureKey(db: Knex, reader: Reader, itemId: string, now: Date): Promise<string | null> {
   const row = await db("assignment_items")
     .join("assignments", "assignments.id", "assignment_items.assignment_id")
@@ -143,8 +146,20 @@ export async function findOwnPictureKey(db: Knex, reader: Reader, itemId: string
       "assignments.department_id": reader.departmentId,
     })
     .where("rounds.opens_at", "<=", now)
+    .where((shown) => shown.whereNot("rounds.state", "released").orWhereNotExists(sealedAgain(db, reader)))
     .first("items.picture_key");
   return row?.picture_key ?? null;
+}
+
+/** The same case in a round of the person's that is not released yet. */
+function sealedAgain(db: Knex, reader: Reader) {
+  return db("items as again")
+    .join("rounds as sealed", "sealed.id", "again.round_id")
+    .join("assignments as theirs", "theirs.round_id", "sealed.id")
+    .whereRaw("again.case_id = items.case_id")
+    .where("theirs.person_id", reader.id)
+    .whereIn("sealed.state", ["open", "closed"])
+    .select(db.raw("1"));
 }
 
 export type OwnShowing = {

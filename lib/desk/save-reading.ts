@@ -18,7 +18,7 @@ export async function saveReading(
 ): Promise<SavedReading> {
   return db.transaction(async (trx) => {
     const showing = await lockShowing(trx, reader, itemId);
-    if (!showing) throw notFound("case in a round of yours");
+    if (!showing) throw notFound("case");
     const stored = await findReading(trx, itemId);
     if (stored?.saveId === input.saveId) return withoutSaveId(stored); // arrived before; the answer was lost
     requireOpenWindow(showing, now);
