@@ -4,8 +4,7 @@ import { compareDegrees, DEGREES_MEASURES } from "./degrees-figures";
 import { onReferenceEye, type ShownItem, usedCategories } from "./examiner-figures";
 import type { PanelFigures } from "./schema";
 
-const RESAMPLES = 1000;
-const SEED = 1;
+const BOOTSTRAP = { resamples: 1000, seed: 1, method: "percentile" } as const;
 
 /** What everybody made of one item. */
 type PanelCase = {
@@ -79,11 +78,11 @@ function sumTables(cases: readonly PanelCase[], indices: readonly number[]): num
 function pooledKappa(cases: readonly PanelCase[], table: number[][]): PanelFigures["kappa"] {
   const pooled = cohenKappa(table);
   if (!pooled.ok) return pooled;
-  const interval = bootstrapInterval(cases.length, (indices) => estimateOf(cohenKappa(sumTables(cases, indices))), {
-    resamples: RESAMPLES,
-    seed: SEED,
-    method: "percentile",
-  });
+  const interval = bootstrapInterval(
+    cases.length,
+    (indices) => estimateOf(cohenKappa(sumTables(cases, indices))),
+    BOOTSTRAP,
+  );
   return { ok: true, n: pooled.n, kappa: withInterval(pooled.kappa.estimate, interval) };
 }
 
@@ -93,31 +92,40 @@ function estimateOf(result: Result<{ kappa: Estimate }>): number {
 
 /** Bias and limits over the differences (degrees) of all cases, one array of differences a case. */
 function pooledLimits(differences: readonly number[][]): PanelFigures["horizontal"] {
-  const n = differences.reduce((total, { length }) => total + length, 0);
+  const sums = differences.map(runningSums);
+  const n = sums.reduce((total, each) => total + each.n, 0);
   if (n < 3) return { ok: false, n, reason: "fewer than three pairs" };
-  const everyCase = differences.map((_, index) => index);
-  const of = (part: keyof Moments) => {
-    const interval = bootstrapInterval(differences.length, (indices) => moments(differences, indices)[part], {
-      resamples: RESAMPLES,
-      seed: SEED,
-      method: "percentile",
-    });
-    return withInterval(moments(differences, everyCase)[part], interval);
-  };
-  const { sd } = moments(differences, everyCase);
-  return { ok: true, n, sd, bias: of("bias"), lower: of("lower"), upper: of("upper") };
+  const pooled = moments(
+    sums,
+    sums.map((_, index) => index),
+  );
+  const of = (part: "bias" | "lower" | "upper") =>
+    withInterval(
+      pooled[part],
+      bootstrapInterval(sums.length, (indices) => moments(sums, indices)[part], BOOTSTRAP),
+    );
+  return { ok: true, n, sd: pooled.sd, bias: of("bias"), lower: of("lower"), upper: of("upper") };
+}
+
+type Sums = { n: number; sum: number; squares: number };
+
+/** What the moments need of one case, so that a resample of the cases need not go through its readings again. */
+function runningSums(differences: readonly number[]): Sums {
+  const sum = differences.reduce((total, difference) => total + difference, 0);
+  const squares = differences.reduce((total, difference) => total + difference * difference, 0);
+  return { n: differences.length, sum, squares };
 }
 
 type Moments = { bias: number; sd: number; lower: number; upper: number };
 
-function moments(differences: readonly number[][], indices: readonly number[]): Moments {
+function moments(cases: readonly Sums[], indices: readonly number[]): Moments {
   let [n, sum, squares] = [0, 0, 0];
   for (const index of indices) {
-    for (const difference of differences[index] ?? []) {
-      n += 1;
-      sum += difference;
-      squares += difference * difference;
-    }
+    const each = cases[index];
+    if (!each) continue;
+    n += each.n;
+    sum += each.sum;
+    squares += each.squares;
   }
   const bias = sum / n;
   const sd = Math.sqrt(Math.max(0, (squares - n * bias * bias) / (n - 1)));
