@@ -1,7 +1,7 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import { loadDriftBoard } from "@/lib/drift/load-drift-board";
-import { mirrorFinding } from "@/lib/reflex/mirror-finding";
 import { ALIGNED } from "@/lib/reflex/finding";
+import { mirrorFinding } from "@/lib/reflex/mirror-finding";
 import { loadRoundResults } from "@/lib/results/load-round-results";
 import { loadScorecard } from "@/lib/results/load-scorecard";
 import { advanceRound } from "@/lib/rounds/advance-round";
