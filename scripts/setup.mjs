@@ -94,7 +94,8 @@ export async function ensureNodePackages() {
     if (nodePackagesAreCurrent()) return;
     console.log("Installing the packages of package-lock.json");
     // Building needs the development packages too, whatever NODE_ENV says.
-    const args = ["ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"];
+    // No install scripts: every binary we use ships inside its package, and a compiler may not be there.
+    const args = ["ci", "--include=dev", "--ignore-scripts", "--no-audit", "--no-fund", "--loglevel=error"];
     const { npm_execpath: npm } = process.env;
     const command = npm?.endsWith(".js") ? [process.execPath, npm] : ["npm"];
     // Ends with this process, however that ends: two installations at once would spoil each other's.
