@@ -11,4 +11,4 @@ export function proxy(request: NextRequest) {
 }
 
 // Never in front of the API: uploads would be cut, and clients there expect problems, not redirects.
-export const config = { matcher: ["/((?!api/|_next/|sign-in$|cautions$|icon\\.svg$|.*\\..*).*)"] };
+export const config = { matcher: ["/((?!api/|_next/|sign-in$|cautions$|method$|icon\\.svg$|.*\\..*).*)"] };

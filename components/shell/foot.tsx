@@ -10,6 +10,8 @@ export function Foot() {
         <Link href="/cautions" className="whitespace-nowrap">
           Cautions and safety card
         </Link>
+        {" · "}
+        <Link href="/method">Method</Link>
       </p>
     </footer>
   );
