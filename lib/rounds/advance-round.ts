@@ -5,7 +5,7 @@ import type { Actor } from "@/lib/auth/actor";
 import { conflict, notFound } from "@/lib/errors";
 import { enqueue } from "@/lib/jobs/enqueue";
 import { publish, removePictures } from "./publish";
-import { hasResults, lockRound, lockRoundById, type Round, setRoundState } from "./queries";
+import { hasResults, lockRound, lockRoundById, type Round, readClock, setRoundState } from "./queries";
 import type { RoundState } from "./schema";
 
 const NEXT: Partial<Record<RoundState, RoundState>> = { draft: "open", open: "closed", closed: "released" };
@@ -43,10 +43,15 @@ export async function advanceRound(
   }
 }
 
-/** For the job queue: closes a round whose time has come. A round closed already is left alone, so it may run again. */
-export async function closeWhenDue(db: Knex, roundId: string, now = new Date()): Promise<void> {
+/**
+ * For the job queue: closes a round whose time has come, by the database's clock unless a time is given. The queue goes
+ * by that clock: a machine behind it would find the round not due, and the job would be gone. A round closed already is
+ * left alone, so it may run again.
+ */
+export async function closeWhenDue(db: Knex, roundId: string, at?: Date): Promise<void> {
   await db.transaction(async (trx) => {
     const round = await lockRoundById(trx, roundId);
+    const now = at ?? (await readClock(trx));
     if (round?.state !== "open" || !round.closesAt || round.closesAt > now) return;
     await close(trx, round, now);
     await appendAudit(trx, { ...auditOf(round, null, "closed"), at: now });

@@ -58,6 +58,12 @@ export async function lockRoundById(trx: Knex.Transaction, roundId: string): Pro
   return row ? toRound(row) : null;
 }
 
+/** The time by the database's clock. */
+export async function readClock(db: Knex): Promise<Date> {
+  const { rows } = await db.raw("SELECT clock_timestamp() AS now");
+  return rows[0].now;
+}
+
 const iso = (date: Date | null) => date?.toISOString() ?? null;
 
 type SummaryRow = RoundRow & {
