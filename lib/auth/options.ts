@@ -4,10 +4,18 @@ import CredentialsProvider from "next-auth/providers/credentials";
 import { z } from "zod";
 import { database } from "@/lib/database";
 import { env } from "@/lib/env";
+import { logError } from "@/lib/log";
 import { verifyPassword } from "./password";
 import { findCredentials } from "./queries";
 
-const SignIn = z.object({ email: z.string().trim().max(254), password: z.string().max(1000) });
+const SignIn = z.object({
+  email: z
+    .string()
+    .trim()
+    .max(254)
+    .refine((email) => !email.includes("\0")), // PostgreSQL's text cannot hold it
+  password: z.string().max(1000),
+});
 
 declare module "next-auth" {
   interface Session {
@@ -24,6 +32,12 @@ declare module "next-auth/jwt" {
   }
 }
 
+async function checkCredentials({ email, password }: z.infer<typeof SignIn>) {
+  const person = await findCredentials(database(), email);
+  const fits = await verifyPassword(person?.passwordHash ?? null, password);
+  return fits && person ? { id: person.id, sessionVersion: person.sessionVersion } : null;
+}
+
 /** Sign-in by e-mail and password. The token holds an id and a version; all rights are read from the database. */
 export function authOptions(): NextAuthOptions {
   return {
@@ -36,9 +50,10 @@ export function authOptions(): NextAuthOptions {
         async authorize(input) {
           const parsed = SignIn.safeParse(input);
           if (!parsed.success) return null;
-          const person = await findCredentials(database(), parsed.data.email);
-          const fits = await verifyPassword(person?.passwordHash ?? null, parsed.data.password);
-          return fits && person ? { id: person.id, sessionVersion: person.sessionVersion } : null;
+          return checkCredentials(parsed.data).catch((error: unknown) => {
+            logError(error, { path: "/api/auth" });
+            throw new Error("unavailable"); // next-auth puts the message into an address: nothing of the inside
+          });
         },
       }),
     ],
