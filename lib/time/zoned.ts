@@ -15,7 +15,8 @@ export function toZonedInput(iso: string, zone: string): string {
 export function fromZonedInput(local: string, zone: string): string | null {
   if (!/^\d{4}-\d\d-\d\dT\d\d:\d\d$/.test(local)) return null;
   const wished = Date.parse(`${local}:00Z`);
-  if (Number.isNaN(wished)) return null;
+  // The engine takes 30 February for 2 March.
+  if (Number.isNaN(wished) || !new Date(wished).toISOString().startsWith(local)) return null;
   // The offset in force lies within a day of the wished time read as UTC; one of the two neighbours fits.
   const offsets = [wished - 86_400_000, wished + 86_400_000].map((instant) => offsetMs(instant, zone));
   const candidates = offsets.map((offset) => wished - offset);
