@@ -81,6 +81,8 @@ describe("agree on findings", () => {
       n: 5,
       observed: near(3 / 5),
     });
+    expect(resultOf(report, "A against the reference", "gwetAC", "direction")).toMatchObject({ observed: near(5 / 6) });
+    expect(resultOf(report, "A against the reference", "cohenKappa", "deviating eye")).toMatchObject({ observed: 1 });
     expect(
       resultOf(
         report,
@@ -104,6 +106,23 @@ describe("agree on findings", () => {
       bias: { estimate: near((0 + 2 + 5 + 0) / 4) },
       leftOut: { unread: 1, notReadable: 1 },
     });
+  });
+
+  it("frees the bias of each from the cases read, reading minus reference", () => {
+    // A reads far too little, by a reversal among others; B reads the cases both read 0, 2, 5 and 0 degrees too far eso.
+    const bias = resultOf(report, "All against the reference", "twoWayBias", "horizontal degrees");
+    expect(bias).toMatchObject({
+      n: 10,
+      examiners: [
+        { examiner: "A", n: 6 },
+        { examiner: "B", n: 4 },
+      ],
+    });
+    const pooled = resultOf(report, "All against the reference", "limitsOfAgreement", "horizontal degrees");
+    expect(pooled).toMatchObject({ n: 10, bias: { estimate: near((2 - 3 - 40 - 20 + 7) / 10) } });
+    // Of the four cases that both read, A's mean difference is (2 − 3)/4 and B's 7/4: two degrees between them.
+    const [a, b] = Object.values(bias?.examiners ?? []).map((row) => row.bias.estimate);
+    expect(b - a).toBeCloseTo(2, 9);
   });
 
   it("counts the kinds of error", () => {
@@ -137,6 +156,32 @@ describe("agree on findings", () => {
       n: 2,
       share: { estimate: 0.5 },
     });
+  });
+
+  it("takes a vertical deviation for the same on either eye, among examiners and in repeats", () => {
+    const lines = [
+      "1 A right hyper 5",
+      "2 A none",
+      "1 B left hypo 5",
+      "2 B none",
+      "1 A left hypo 5",
+      "2 A right eso 10",
+    ];
+    const report = reportOf(findingTable(...lines));
+    expect(resultOf(report, "Among the examiners", "fleissKappa", "direction")).toMatchObject({ observed: 1 });
+    const share = resultOf(report, "A against own repeats", "wilsonInterval", "direction", "same label");
+    expect(share).toMatchObject({ n: 2, share: { estimate: 0.5 } });
+    const again = reportOf(findingTable("1 A right hyper 5", "1 A left hypo 5"));
+    expect(resultOf(again, "A against own repeats", "wilsonInterval", "direction", "same label")).toMatchObject({
+      share: { estimate: 1 },
+    });
+  });
+
+  it("follows nobody over a single round", () => {
+    const [header, ...lines] = PAIR.split("\n");
+    const report = reportOf([`${header},round`, ...lines.map((line) => `${line},1`)].join("\n"));
+    expect(report.rounds).toEqual(["1"]);
+    expect(report.sections.map(({ title }) => title)).not.toContain("A over the rounds");
   });
 
   it("follows an examiner over the rounds, in the order of their numbers", () => {
@@ -226,6 +271,9 @@ describe("agree on values", () => {
       observed: 0.75,
     });
     expect(resultOf(nominal, "A against the reference", "cohenKappa", "values", "linear weights")).toBeUndefined();
+    expect(resultOf(nominal, "A against the reference", "wilsonInterval", "values", "same label")).toMatchObject({
+      share: { estimate: 0.75 },
+    });
     const ordinal = reportOf(text, "--scale=ordinal");
     expect(resultOf(ordinal, "A against the reference", "cohenKappa", "values", "linear weights")).toMatchObject({
       observed: near(1 - 1 / 12),
@@ -253,6 +301,12 @@ describe("agree on values", () => {
     expect(resultOf(report, "Among the examiners", "limitsWithReplicates", "values", "A minus B")).toMatchObject({
       bias: { estimate: near(-1) },
     });
+    const ofOne = reportOf(
+      ["subject,rater,value", ...lines.slice(0, -1).filter((_, index) => index % 4 < 3)].join("\n"),
+      "--scale",
+      "interval",
+    );
+    expect(ofOne.sections[0]?.statistics.map(({ statistic }) => statistic)).not.toContain("limitsWithReplicates");
     expect(resultOf(report, "B against own repeats", "repeatability", "values")).toMatchObject({
       n: 3,
       withinSd: { estimate: near(Math.sqrt(4.5)) },

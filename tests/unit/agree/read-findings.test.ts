@@ -78,6 +78,13 @@ describe("readFindings", () => {
     expect(faults.every((fault) => fault.line === 2)).toBe(true);
   });
 
+  it("says what degrees may be, whatever stands there instead", () => {
+    for (const text of ["many", "46", "0", "1.5", "-3", "> 45"]) {
+      const [fault] = faultsOf(`${HEADER}\n1,A,right,eso,${text},none,,yes`);
+      expect(fault?.message).toBe("Degrees are whole numbers from 1 to 45, or >45 beyond the limbus.");
+    }
+  });
+
   it("finds the faults of every row, with lines that count those within quotes", () => {
     const faults = faultsOf(`${HEADER}\n"1\n",A,up,eso,15,none,,yes\n2,A,right,eso,99,none,,yes`);
     expect(faults.map(({ line, column }) => [line, column])).toEqual([
