@@ -20,7 +20,7 @@ export const BIAS_ENTRIES: readonly MethodEntry[] = [
     ],
     letters: [{ sign: m`x, y`, meaning: "size in the reference, and size read" }],
     limits:
-      "Up to about 29 of 100 wild points do not move it. It needs references of several sizes. Its interval counts pairs by Kendall’s statistic and is left out where there are too few points.",
+      "Up to about 29 of 100 wild points do not move it (from memory). It needs references of several sizes. Its interval counts pairs by Kendall’s statistic and is left out where there are too few points.",
     source:
       "Theil, Indagationes Mathematicae 1950; 12: 85-91; Sen, Journal of the American Statistical Association 1968; 63: 1379-1389.",
     example: theilSenExample(),

@@ -105,7 +105,7 @@ export const DRIFT_ENTRIES: readonly MethodEntry[] = [
       { sign: m`Q`, meaning: "probabilities of going from state to state without a signal" },
     ],
     limits:
-      "It is for independent normal values with a sigma that is known; for few readings sigma is not, and false alarms are more frequent than computed. It is a mean of a very skew distribution: half of the false alarms come before about 0.7 of it. It counts points, so four rounds a year take years to show what 12 show in one.",
+      "It is for independent normal values with a sigma that is known; for few readings sigma is not, and false alarms are more frequent than computed. It is a mean of a very skew distribution: half of the false alarms come before about 0.7 of it (ln 2, as in a geometric distribution). It counts points, so four rounds a year take years to show what 12 show in one.",
     source:
       "Brook & Evans, Biometrika 1972; 59: 539-549; Lucas & Crosier, Technometrics 1982; 24: 199-205; Lucas & Saccucci, Technometrics 1990; 32: 1-12.",
     example: runLengthExample(),
