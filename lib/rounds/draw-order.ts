@@ -5,8 +5,8 @@ const ATTEMPTS = 200;
 
 /**
  * An order of reading for one examiner: every order as likely as any other in which showings of one case lie at least
- * a third of the round apart. Where chance finds none (rounds of a few items, or with many
- * repeats), the order found that keeps them furthest.
+ * a third of the round apart. Where chance finds none (rounds of a few items, or with many repeats), the order found
+ * that keeps them furthest.
  *
  * `random` gives uniform numbers in [0, 1).
  */
