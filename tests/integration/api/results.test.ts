@@ -104,13 +104,8 @@ describe("GET /api/rounds/[roundId]/results", () => {
         horizontal: { limits: { ok: false, n: 1, reason: "fewer than three pairs" }, leftOut: { unread: 2 } },
         errorCounts: { "horizontal direction reversed": 1 },
       });
-      const submitted = results?.examiners.map(({ personId, submittedAt }) => [personId, submittedAt !== null]);
-      expect(new Map(submitted as [string, boolean][])).toEqual(
-        new Map([
-          [people.own.examiner.id, true],
-          [people.own.trainee.id, false],
-        ]),
-      );
+      const submitted = results?.examiners.filter(({ submittedAt }) => submittedAt !== null);
+      expect(submitted?.map(({ personId }) => personId)).toEqual([people.own.examiner.id]);
     });
     it("answers 404 to a reviewer until the release", async () => {
       expectProblem(await get("reviewer"), 404, "not-found");
