@@ -7,7 +7,7 @@ import { reportLabels, reportMeasurements } from "./report-values";
 import { readRows } from "./table-columns";
 import { TableError, type TableFault } from "./table-error";
 
-export type Outcome = { output: string; errors: string; exitCode: 0 | 2 };
+export type Printed = { output: string; errors: string; exitCode: 0 | 2 };
 
 const USAGE = `npm run agree -- FILE.csv [--json]
     case,examiner,eye,horizontal,horizontal_degrees,vertical,vertical_degrees,readable[,round]
@@ -21,7 +21,7 @@ const FAULTS_SHOWN = 20;
  * The command for people outside the browser: prints every statistic that applies to a long table.
  * `readFile` gives the text of a file or throws. Bad arguments, a file that cannot be read and a bad table end with 2.
  */
-export function agree(args: readonly string[], readFile: (path: string) => string): Outcome {
+export function agree(args: readonly string[], readFile: (path: string) => string): Printed {
   const options = parseArguments(args);
   if (typeof options === "string") return { output: "", errors: `${options}\n${USAGE}`, exitCode: 2 };
   if (options.help) return { output: USAGE, errors: "", exitCode: 0 };

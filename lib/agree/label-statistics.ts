@@ -9,9 +9,7 @@ import { codeRatings, countByCategory, type Label, type LabelRatings } from "@/l
 import { lightKappa } from "@/lib/statistics/light-kappa";
 import { pairwiseKappa } from "@/lib/statistics/pairwise-kappa";
 import { wilsonInterval } from "@/lib/statistics/wilson-interval";
-import type { Outcome, Statistic } from "./report";
-
-const BOOTSTRAP = { resamples: 2000, seed: 1 };
+import { BOOTSTRAP, type Outcome, type Statistic } from "./report";
 
 export type LabelScale = {
   of: string;

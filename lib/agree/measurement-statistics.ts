@@ -8,7 +8,7 @@ import { repeatability } from "@/lib/statistics/repeatability";
 import { theilSen } from "@/lib/statistics/theil-sen";
 import { type BiasReading, twoWayBias } from "@/lib/statistics/two-way-bias";
 import { column } from "./panel-sections";
-import type { Statistic } from "./report";
+import { BOOTSTRAP, type Statistic } from "./report";
 
 /** How far readings lie from a reference, case by case; every difference is reading minus reference. */
 export function measureAgainst(readings: Readings, reference: Readings, of: string): Statistic[] {
@@ -38,7 +38,7 @@ export function measureAmong(rows: Ratings, examiners: readonly string[], of: st
       statistic: "krippendorffAlpha",
       of,
       variant: "interval",
-      result: krippendorffAlpha(rows, { metric: "interval", bootstrap: { resamples: 2000, seed: 1 } }),
+      result: krippendorffAlpha(rows, { metric: "interval", bootstrap: BOOTSTRAP }),
     },
     { statistic: "intraclassCorrelation", of, result: intraclassCorrelation(rows) },
     { statistic: "limitsWithMean", of, result: withNames },
@@ -51,7 +51,7 @@ export function measureRepeats(replicates: Ratings, of: string): Statistic {
   return { statistic: "repeatability", of, result: repeatability(replicates) };
 }
 
-/** Biases of examiners, cases and rounds from all differences together; of examiners alone in words for people. */
+/** Biases of examiners, cases and rounds from all differences together. */
 export function measureBias(differences: readonly BiasReading[], of: string): Statistic {
   return { statistic: "twoWayBias", of, result: twoWayBias(differences) };
 }

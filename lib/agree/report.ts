@@ -29,6 +29,9 @@ export type Report = {
   sections: Section[];
 };
 
+/** For intervals that have no formula. The same table always gives the same ones. */
+export const BOOTSTRAP = { resamples: 2000, seed: 1 };
+
 /** In words, for people. Keys are the names for machines. */
 export const STATISTIC_TITLES = {
   caseDisagreement: "how each case was read",
