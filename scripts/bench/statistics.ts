@@ -56,6 +56,8 @@ function callsOn(panel: Panel): Record<string, () => unknown> {
     const own = crossTable(firstLabels, column(labels, examiner));
     return own.ok ? cohenKappa(own.counts) : own;
   }).slice(1);
+  // Some statistics take complete rows only, and with this many examiners hardly any row would be.
+  const complete = degrees.map((row) => row.map((degree) => degree ?? 0));
   const replicates = degrees.map((row) => row.slice(0, 3));
   const differences = degrees.flatMap((row, index) =>
     row.map((degree, examiner) => ({
@@ -82,10 +84,10 @@ function callsOn(panel: Panel): Record<string, () => unknown> {
     "gwetAC, weighted": () => gwetAC(steps, { weights: "quadratic", categories: STEPS.map((_, index) => index) }),
     caseDisagreement: () => caseDisagreement(labels),
     compareKappas: () => compareKappas(kappas),
-    intraclassCorrelation: () => intraclassCorrelation(replicates),
+    intraclassCorrelation: () => intraclassCorrelation(complete),
     limitsOfAgreement: () => limitsOfAgreement(first, second),
     limitsWithReplicates: () => limitsWithReplicates(replicates, replicates),
-    limitsWithMean: () => limitsWithMean(replicates),
+    limitsWithMean: () => limitsWithMean(complete),
     repeatability: () => repeatability(degrees),
     concordance: () => concordance(first, second),
     theilSen: () => theilSen(first, second),
