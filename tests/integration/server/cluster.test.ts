@@ -65,7 +65,7 @@ describe.skipIf(testEnv().TEST_DATABASE === "container")("startCluster", { timeo
     const file = path.join(options.folder, "data/postmaster.pid");
     const content = readFileSync(file, "utf8").split("\n");
     await first.stop();
-    const other = spawn("sleep", ["60"]);
+    const other = spawn("sleep", ["60"], { ...options.runAs }); // of another user it would not count
     writeFileSync(file, [other.pid, ...content.slice(1)].join("\n"));
     expect(await query(await start(), "SELECT row FROM kept")).toEqual([{ row: "still here" }]);
     other.kill();
