@@ -30,7 +30,10 @@ export function startWeb(mode: "start" | "dev", port: number, settings: Settings
   const next = path.join(ROOT, "node_modules/next/dist/bin/next");
   const args = [next, mode, "--hostname", "127.0.0.1", "--port", String(port)];
   const env = { ...settings, NODE_ENV: mode === "dev" ? "development" : "production" };
-  return startTied(script("The application", args, env, output));
+  // In development Next.js is two processes, of which the first ends the second when it is asked to end. In production
+  // it would wait for open connections, with the port that the next start wants.
+  const signalWhenOrphaned = mode === "dev" ? "TERM" : "KILL";
+  return startTied({ ...script("The application", args, env, output), signalWhenOrphaned });
 }
 
 /** Waits until something answers, a refusal too: then the server is there. Throws with the end of its log. */

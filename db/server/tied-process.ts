@@ -14,7 +14,7 @@ export type TiedOptions = {
   /** Where its output goes, after what is there already; "inherit" for ours. */
   output: { logFile: string } | "inherit";
   /** What the kernel sends it when our process ends without stopping it. */
-  signalWhenOrphaned?: "KILL" | "INT";
+  signalWhenOrphaned?: "KILL" | "INT" | "TERM";
 };
 
 export type TiedProcess = {
