@@ -25,7 +25,7 @@ export async function startLocalServices(onService: (service: Service) => void):
   const state = keepLocalState(ROOT, runAs);
   const settings: Record<string, string> = {};
   if (hasOwnDatabase) {
-    console.log("Starting PostgreSQL");
+    console.log(`Starting PostgreSQL, with its data in ${state.clusterFolder}`);
     const cluster = await startCluster({
       folder: state.clusterFolder,
       runAs,
