@@ -22,7 +22,7 @@ async function becomeTheOne() {
       return false;
     }
     if (other?.state === "stopping") tell(`Waiting for process ${other.pid}, which is stopping.`);
-    if (other?.state === "starting") tell(`Waiting for process ${other.pid}, which is installing packages.`);
+    if (other?.state === "starting") tell(`Waiting for process ${other.pid}, which is still getting ready.`);
     await sleep(300);
   }
 }
