@@ -2,7 +2,7 @@ import { spawn } from "node:child_process";
 import { existsSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, onTestFinished } from "vitest";
 import { inheritedEnv } from "@/lib/env";
 import { NO_ENGINE } from "@/tests/support/database-server";
 
@@ -29,8 +29,8 @@ async function launch(home: string): Promise<string> {
 describe.skipIf(existsSync("/var/run/docker.sock"))("TEST_DATABASE=container", () => {
   it("says in one sentence that no Docker engine answers", async () => {
     const home = mkdtempSync(path.join(tmpdir(), "evenglint-home-"));
+    onTestFinished(() => rmSync(home, { recursive: true }));
     expect(await launch(home)).toBe(NO_ENGINE);
     expect(NO_ENGINE.match(/[.!?]/g)).toHaveLength(1);
-    rmSync(home, { recursive: true });
   });
 });
